@@ -1,0 +1,4 @@
+import { ensureBuild, ensurePackages } from './ensure.mjs';
+
+ensurePackages();
+ensureBuild();
