@@ -64,7 +64,7 @@ export default tseslint.config(
     },
   },
   {
-    files: ['*.config.ts', 'tests/**/playwright*.ts', '.config/**'],
+    files: ['*.config.ts', 'tests/browser/global-setup.ts', '.config/**'],
     rules: { 'no-restricted-syntax': 'off' },
   },
   {

@@ -4,6 +4,7 @@ import { defineConfig } from '@playwright/test';
 export default defineConfig({
   testDir: '../tests/browser',
   outputDir: '../.cache/browser',
+  globalSetup: '../tests/browser/global-setup.ts',
   timeout: 90_000,
   workers: 2,
   fullyParallel: false,
