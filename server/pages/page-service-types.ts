@@ -1,4 +1,3 @@
-import type { PreviewBody } from '../../shared/contracts/bodies.ts';
 import type { Answer } from '../../shared/contracts/api.ts';
 import type {
   CompareView,
@@ -41,7 +40,7 @@ export interface PageService {
   revision(actor: Actor, address: PageAddress, number: number, variant: Variant): Answer<PageView>;
   compare(actor: Actor, address: PageAddress, from: number, to: number): Answer<CompareView>;
   /** `networkAddress` is whose parsing time is rationed: 20 s a minute. */
-  preview(actor: Actor, body: PreviewBody, networkAddress: string): Answer<PreviewView>;
+  preview(actor: Actor, body: unknown, networkAddress: string): Answer<PreviewView>;
 
   /** Every page that is published and not retired, for the index; not guarded, so never hand it out as it is. */
   publishedDocuments(): Iterable<PublishedDocument>;
