@@ -43,7 +43,7 @@ describe('who may do what to a proposal that was sent', () => {
   row('change proposal', proposal, ['member']);
   row('decide on proposal', proposal, ['moderator', 'admin']);
 
-  it("keeps it from a member who is not its author, and lets no moderator decide on their own", () => {
+  it('keeps it from a member who is not its author, and lets no moderator decide on their own', () => {
     expect(can(member('member', 'another'), 'see proposal', proposal)).toBe(false);
     expect(can(actors.moderator, 'decide on proposal', { authorId: 'moderator', sent: true })).toBe(false);
     expect(can(actors.admin, 'decide on proposal', { authorId: 'admin', sent: true })).toBe(false);
