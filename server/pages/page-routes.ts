@@ -1,0 +1,120 @@
+import { z } from 'zod';
+import { previewBodySchema } from '../../shared/contracts/bodies.ts';
+import {
+  compareViewSchema,
+  homeViewSchema,
+  pageDataSchema,
+  pageViewSchema,
+  previewViewSchema,
+  revisionsViewSchema,
+  shelfViewSchema,
+  subjectViewSchema,
+} from '../../shared/contracts/views.ts';
+import {
+  pageParameters,
+  revisionNumber,
+  shelfParameters,
+  subjectParameters,
+  variantOf,
+  variantQuery,
+} from '../http/route-parts.ts';
+import { defineRoute } from '../http/route.ts';
+
+/** Reading the book, and looking at a text before it is proposed. */
+export const pageRoutes = [
+  defineRoute({
+    method: 'get',
+    path: '/api/home',
+    name: 'home',
+    summary: 'The shelves, the donors, and what was published lately',
+    view: homeViewSchema,
+    answer: (api) => api.home(),
+  }),
+  defineRoute({
+    method: 'get',
+    path: '/api/shelves/{shelf}',
+    name: 'shelf',
+    summary: 'The subjects of a shelf',
+    parameters: shelfParameters,
+    view: shelfViewSchema,
+    problems: ['not-found'],
+    answer: (api, { parameters }) => api.shelf(parameters.shelf),
+  }),
+  defineRoute({
+    method: 'get',
+    path: '/api/shelves/{shelf}/{subject}',
+    name: 'subject',
+    summary: 'One donor, part or topic: its facts, pages and connectors',
+    parameters: subjectParameters,
+    view: subjectViewSchema,
+    problems: ['not-found'],
+    answer: (api, { parameters }) => api.subject(parameters),
+  }),
+  defineRoute({
+    method: 'get',
+    path: '/api/pages/{shelf}/{subject}/{page}',
+    name: 'pageData',
+    summary: 'A published page with its text, its blocks and the address of each line',
+    parameters: pageParameters,
+    query: variantQuery,
+    view: pageDataSchema,
+    problems: ['bad-request', 'not-found'],
+    answer: (api, { parameters, query }) => api.pageData(parameters, variantOf(query)),
+  }),
+  defineRoute({
+    method: 'get',
+    path: '/api/pages/{shelf}/{subject}/{page}/view',
+    name: 'page',
+    summary: 'A published page as a reader sees it, without its text and data',
+    parameters: pageParameters,
+    query: variantQuery,
+    view: pageViewSchema,
+    problems: ['bad-request', 'not-found'],
+    answer: (api, { parameters, query }) => api.page(parameters, variantOf(query)),
+  }),
+  defineRoute({
+    method: 'get',
+    path: '/api/pages/{shelf}/{subject}/{page}/revisions',
+    name: 'revisions',
+    summary: 'Every published revision of a page, newest first',
+    parameters: pageParameters,
+    view: revisionsViewSchema,
+    problems: ['not-found'],
+    answer: (api, { parameters }) => api.revisions(parameters),
+  }),
+  defineRoute({
+    method: 'get',
+    path: '/api/pages/{shelf}/{subject}/{page}/revisions/{number}',
+    name: 'revision',
+    summary: 'One revision of a page as a reader sees it',
+    parameters: pageParameters.extend({ number: revisionNumber }),
+    query: variantQuery,
+    view: pageViewSchema,
+    problems: ['bad-request', 'not-found'],
+    answer: (api, { parameters, query }) => {
+      const { number, ...address } = parameters;
+      return api.revision(address, number, variantOf(query));
+    },
+  }),
+  defineRoute({
+    method: 'get',
+    path: '/api/pages/{shelf}/{subject}/{page}/compare',
+    name: 'compare',
+    summary: 'What changed from one revision of a page to another',
+    parameters: pageParameters,
+    query: z.object({ from: revisionNumber, to: revisionNumber }),
+    view: compareViewSchema,
+    problems: ['bad-request', 'not-found'],
+    answer: (api, { parameters, query }) => api.compare(parameters, query.from, query.to),
+  }),
+  defineRoute({
+    method: 'post',
+    path: '/api/preview',
+    name: 'preview',
+    summary: 'A text as the book would show it, with its findings; parsing time is rationed',
+    body: previewBodySchema,
+    view: previewViewSchema,
+    problems: ['fields-invalid', 'not-acceptable-text', 'takes-too-long', 'too-many-requests', 'busy'],
+    answer: (api, { body }) => api.preview(body),
+  }),
+];
