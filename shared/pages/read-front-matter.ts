@@ -1,0 +1,246 @@
+import { isMap, isNode, isScalar, LineCounter, parseDocument, type Document, type YAMLMap } from 'yaml';
+import { colourOfWords } from '../wire-colours/colour-words.ts';
+import { colourSystemNames, type ColourName, type ColourSystem } from '../wire-colours/colour-system.ts';
+import type { Applicability } from './applicability.ts';
+import { appliesToAll } from './applicability.ts';
+import { finding, type Finding } from './finding.ts';
+import {
+  sourceKinds,
+  wireStandards,
+  type FrontMatter,
+  type Source,
+  type SubjectFacts,
+  type WireStandard,
+} from './front-matter.ts';
+import { pageKinds, type PageKind } from './page-kind.ts';
+import { readApplicability } from './read-applicability.ts';
+
+/** What a page without front matter has: no title, notes, Japanese letters. */
+export const emptyFrontMatter: FrontMatter = {
+  title: '',
+  kind: 'notes',
+  summary: '',
+  applies: appliesToAll,
+  colours: { name: 'jis' },
+  wireStandard: 'jis',
+  sources: [],
+  facts: {
+    maker: null,
+    model: null,
+    years: null,
+    markets: [],
+    voltage: null,
+    ignition: null,
+    charging: null,
+    battery: null,
+    earth: null,
+  },
+};
+
+/** Front matter longer than this is not read: its YAML would take longer than the page. */
+const longestFrontMatter = 16 * 1024;
+
+/** Front matter as read, with a finding for every field that could not be. */
+export interface FrontMatterReading {
+  readonly frontMatter: FrontMatter;
+  readonly findings: readonly Finding[];
+}
+
+/**
+ * Reads a page's front matter.
+ * @param yaml the text between the two lines of hyphens
+ * @param firstLine the page's line on which that text begins, counted from 1
+ * Never throws: what cannot be read has its default and a `block-unreadable` finding that says what was expected.
+ */
+export function readFrontMatter(yaml: string, firstLine: number): FrontMatterReading {
+  if (yaml.length > longestFrontMatter) {
+    const message = `The front matter is longer than ${longestFrontMatter / 1024} kB and is not read. Shorten it; text belongs in the page.`;
+    return { frontMatter: emptyFrontMatter, findings: [finding('block-unreadable', message, firstLine)] };
+  }
+  const lineCounter = new LineCounter();
+  let document: Document.Parsed;
+  let values: unknown;
+  try {
+    document = parseDocument(yaml, { lineCounter, prettyErrors: false, logLevel: 'silent' });
+    values = document.toJS({ maxAliasCount: 20 });
+  } catch {
+    const message = 'The front matter is nested too deeply to be read. Write plain fields, one a line.';
+    return { frontMatter: emptyFrontMatter, findings: [finding('block-unreadable', message, firstLine)] };
+  }
+  const lineAt = (offset: number): number => firstLine + lineCounter.linePos(offset).line - 1;
+  const findings = document.errors.slice(0, 1).map(({ message, pos }) => {
+    const reason = message.split('\n')[0] ?? '';
+    const words = `The front matter cannot be read: ${reason}. Write one field a line as \`name: value\`, and put a value that has a colon in quotes.`;
+    return finding('block-unreadable', words, lineAt(pos[0]));
+  });
+  if (values === null || values === undefined) return { frontMatter: emptyFrontMatter, findings };
+  if (!isMap(document.contents) || !isFields(values)) {
+    if (findings.length > 0) return { frontMatter: emptyFrontMatter, findings };
+    const message = 'The front matter is no list of fields. Write one field a line as `name: value`.';
+    return { frontMatter: emptyFrontMatter, findings: [finding('block-unreadable', message, firstLine)] };
+  }
+  const reader = new FieldReader(values, lineOfFields(document.contents, lineAt, firstLine));
+  return { frontMatter: reader.read(), findings: [...findings, ...reader.findings] };
+}
+
+type Fields = Readonly<Record<string, unknown>>;
+
+function isFields(value: unknown): value is Fields {
+  return typeof value === 'object' && value !== null && !Array.isArray(value);
+}
+
+function lineOfFields(map: YAMLMap, lineAt: (offset: number) => number, firstLine: number): ReadonlyMap<string, number> {
+  const lines = new Map<string, number>();
+  for (const { key } of map.items) {
+    const offset = isNode(key) ? key.range?.[0] : undefined;
+    if (isScalar(key) && offset !== undefined) lines.set(String(key.value), lineAt(offset));
+  }
+  lines.set('', firstLine);
+  return lines;
+}
+
+/** Reads field after field and gathers what could not be read. */
+class FieldReader {
+  readonly findings: Finding[] = [];
+  readonly #fields: Fields;
+  readonly #lines: ReadonlyMap<string, number>;
+
+  constructor(fields: Fields, lines: ReadonlyMap<string, number>) {
+    this.#fields = fields;
+    this.#lines = lines;
+  }
+
+  read(): FrontMatter {
+    return {
+      title: this.#text('title') ?? '',
+      kind: this.#oneOf<PageKind>('kind', pageKinds) ?? 'notes',
+      summary: this.#text('summary') ?? '',
+      applies: this.#applies(),
+      colours: this.#colours(),
+      wireStandard: this.#oneOf<WireStandard>('wire-standard', wireStandards) ?? 'jis',
+      sources: this.#sources(),
+      facts: this.#facts(),
+    };
+  }
+
+  #complain(field: string, message: string): void {
+    const line = this.#lines.get(field) ?? this.#lines.get('') ?? 1;
+    this.findings.push(finding('block-unreadable', message, line));
+  }
+
+  #text(field: string): string | null {
+    const text = textOf(this.#fields[field]);
+    if (text === undefined) this.#complain(field, `In the front matter \`${field}\` should be words, not a list or fields.`);
+    return text ?? null;
+  }
+
+  #oneOf<Name extends string>(field: string, names: readonly Name[]): Name | null {
+    const text = this.#text(field);
+    if (text === null) return null;
+    const found = names.find((name) => name === text.toLowerCase());
+    if (found === undefined) {
+      this.#complain(field, `In the front matter \`${field}: ${text}\` is not known. Write one of ${names.join(', ')}.`);
+    }
+    return found ?? null;
+  }
+
+  #names(field: string, value: unknown): string | null {
+    if (!Array.isArray(value)) {
+      const text = textOf(value);
+      if (text === undefined) this.#complain(field, `In the front matter \`${field}\` should be names with commas between them.`);
+      return text ?? null;
+    }
+    return value.map((entry: unknown) => textOf(entry) ?? '').join(',');
+  }
+
+  #applies(): Applicability {
+    const value = this.#fields['applies'];
+    if (value === undefined || value === null) return appliesToAll;
+    if (!isFields(value)) {
+      this.#complain('applies', 'In the front matter `applies` should hold `years`, `markets` or `frames`: `applies: {years: 1978-1981}`.');
+      return appliesToAll;
+    }
+    const { applies, unreadableYears } = readApplicability({
+      years: this.#names('applies', value['years']),
+      markets: this.#names('applies', value['markets']),
+      frames: this.#names('applies', value['frames']),
+    });
+    if (unreadableYears !== null) {
+      this.#complain('applies', `The years \`${unreadableYears}\` cannot be read. Write them as 1978, 1978-1981, 1980- or -1979.`);
+    }
+    return applies;
+  }
+
+  #colours(): ColourSystem {
+    const name = this.#oneOf('colours', colourSystemNames);
+    const key = this.#fields['colour-key'];
+    if (name === null) return { name: 'jis' };
+    if (name !== 'own') return { name };
+    if (!isFields(key)) {
+      this.#complain('colours', '`colours: own` needs a key: `colour-key: {B: white, N: black}`.');
+      return { name: 'own', key: {} };
+    }
+    return { name: 'own', key: this.#colourKey(key) };
+  }
+
+  #colourKey(key: Fields): Readonly<Record<string, ColourName>> {
+    const read: [string, ColourName][] = [];
+    for (const [code, value] of Object.entries(key)) {
+      const colour = colourOfWords(textOf(value) ?? '');
+      if (colour !== null) read.push([code, colour]);
+      else this.#complain('colour-key', `In the colour key \`${code}\` should be a colour in words, as in \`${code}: light green\`.`);
+    }
+    return Object.fromEntries(read);
+  }
+
+  #sources(): readonly Source[] {
+    const value = this.#fields['sources'];
+    if (value === undefined || value === null) return [];
+    const expected = 'Each source is written as `- {id: m1, kind: factory-manual, title: …, where: …}`.';
+    if (!Array.isArray(value)) {
+      this.#complain('sources', `In the front matter \`sources\` should be a list. ${expected}`);
+      return [];
+    }
+    const sources: Source[] = [];
+    value.forEach((entry: unknown, index) => {
+      const fields = isFields(entry) ? entry : {};
+      const id = textOf(fields['id']) ?? '';
+      const kindWritten = textOf(fields['kind']) ?? '';
+      const kind = sourceKinds.find((name) => name === kindWritten.toLowerCase());
+      if (id === '' || /[\s,;]/.test(id)) {
+        this.#complain('sources', `Source ${index + 1} has no id without spaces. ${expected}`);
+      } else if (kind === undefined) {
+        this.#complain('sources', `The kind of source \`${id}\` is not known. Write one of ${sourceKinds.join(', ')}.`);
+      } else if (sources.some((source) => source.id === id)) {
+        this.#complain('sources', `Two sources have the id \`${id}\`. Give each its own.`);
+      } else {
+        sources.push({ id, kind, title: textOf(fields['title']) ?? '', where: textOf(fields['where']) ?? null });
+      }
+    });
+    return sources;
+  }
+
+  #facts(): SubjectFacts {
+    const markets = readApplicability({ markets: this.#names('markets', this.#fields['markets']) }).applies.markets;
+    return {
+      maker: this.#text('maker'),
+      model: this.#text('model'),
+      years: this.#text('years'),
+      markets,
+      voltage: this.#text('voltage'),
+      ignition: this.#text('ignition'),
+      charging: this.#text('charging'),
+      battery: this.#text('battery'),
+      earth: this.#oneOf<'negative' | 'positive'>('earth', ['negative', 'positive']),
+    };
+  }
+}
+
+/** A field's words: null where it is empty, undefined where it is a list or has fields of its own. */
+function textOf(value: unknown): string | null | undefined {
+  if (value === null || value === undefined) return null;
+  if (typeof value === 'object') return undefined;
+  if (typeof value !== 'string' && typeof value !== 'number' && typeof value !== 'boolean') return undefined;
+  const text = String(value).trim();
+  return text === '' ? null : text;
+}
