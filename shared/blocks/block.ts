@@ -5,6 +5,7 @@ import type { Rating } from './rating.ts';
 import type { WireSize } from '../electrics/wire-sizes.ts';
 import type { Expectation } from './expectation.ts';
 import type { Condition } from './condition.ts';
+import type { SourceTableRow } from './source-table.ts';
 
 /** A terminal by name: a component's or connector's id and the terminal; null where the id alone is written. */
 export interface TerminalName {
@@ -40,6 +41,8 @@ interface BlockBase {
   readonly endLine: number;
   /** Attributes that the program does not read; kept for the writer. */
   readonly otherAttributes: Readonly<Record<string, string>>;
+  /** Rows of the table that could not be read as lines (findings say why) and are still shown; absent without any. */
+  readonly unreadRows?: readonly SourceTableRow[];
 }
 
 /** One wire's colour as it stands in a cell: what was written and what it reads as. */
