@@ -35,3 +35,10 @@ export interface ParsePool {
   /** Ends the workers; whatever still waits is answered `busy`. */
   close(): Promise<void>;
 }
+
+/** What a worker says: that it begins to read what it was sent, and then how that ended. */
+export type FromParseWorker =
+  | { readonly kind: 'reading' }
+  | { readonly kind: 'read'; readonly page: ParsedPage }
+  | { readonly kind: 'refused'; readonly refusal: TextRefusal }
+  | { readonly kind: 'failed'; readonly stack: string };
