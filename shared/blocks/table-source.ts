@@ -83,9 +83,9 @@ export function formatTable({ headings, rows, alignments = [] }: SourceTable): s
   const body = [headings, ...rows.map(({ cells }) => cells)].map((cells) => cells.map(escapePipes));
   const columns = body.reduce((most, cells) => Math.max(most, cells.length), 0);
   const widths = Array.from({ length: columns }, (_, column) =>
-    body.reduce((most, cells) => Math.max(most, displayWidth(cells[column] ?? '')), 2),
+    body.reduce((most, cells) => Math.max(most, displayWidth(cells[column] ?? '')), 3),
   );
-  const delimiter = headings.map((_, column) => delimiterOf(alignments[column] ?? null, widths[column] ?? 2));
+  const delimiter = headings.map((_, column) => delimiterOf(alignments[column] ?? null, widths[column] ?? 3));
   const [heading = [], ...rest] = body.map((cells) =>
     cells.map((cell, column) => padToWidth(cell, widths[column] ?? 0, alignments[column] ?? 'left')),
   );
