@@ -1,0 +1,99 @@
+import { hazardKinds, type Block, type ComponentKind, type HazardBlock, type HazardKind, type Line, type SwitchRole, type TableBlock } from './block.ts';
+import { isTableBlock } from './lines.ts';
+
+/** The words by which a circuit, a name or a heading touches a hazard; whole words, plural too. */
+const hazardWords: Readonly<Record<HazardKind, readonly string[]>> = {
+  battery: ['battery', 'main fuse'],
+  starter: ['starter', 'start relay', 'start button'],
+  ignition: ['ignition coil', 'igniter', 'pickup', 'pick up', 'kill switch'],
+  charging: ['alternator', 'dynamo', 'regulator'],
+  fuel: ['fuel pump', 'fuel tap', 'fuel sender', 'tank'],
+  brakes: ['brake lamp', 'brake switch', 'headlamp', 'indicator'],
+};
+
+const hazardOfComponent: Readonly<Partial<Record<ComponentKind, HazardKind>>> = {
+  battery: 'battery',
+  starter: 'starter',
+  'ignition-coil': 'ignition',
+  igniter: 'ignition',
+  alternator: 'charging',
+  dynamo: 'charging',
+  regulator: 'charging',
+};
+
+/** A switch whose role says that it is the one that the words name. */
+const hazardOfRole: Readonly<Partial<Record<SwitchRole, HazardKind>>> = {
+  start: 'starter',
+  kill: 'ignition',
+  brake: 'brakes',
+  indicators: 'brakes',
+};
+
+const patterns: ReadonlyMap<HazardKind, RegExp> = new Map(
+  hazardKinds.map((kind) => [kind, new RegExp(`(?<![\\p{L}\\p{N}])(?:${hazardWords[kind].map(withPlural).join('|')})(?![\\p{L}\\p{N}])`, 'iu')]),
+);
+
+function withPlural(words: string): string {
+  const spaced = words.replace(/ /g, '[\\s-]+');
+  return spaced.endsWith('y') ? `${spaced.slice(0, -1)}(?:y|ies)` : `${spaced}(?:e?s)?`;
+}
+
+/** The hazards that a text names, in the order of section 15's table. */
+export function hazardsNamed(text: string): readonly HazardKind[] {
+  return hazardKinds.filter((kind) => patterns.get(kind)?.test(text));
+}
+
+/** The hazards that a block touches: by its components, its names and its circuits. A caution and a sum touch none. */
+export function hazardsTouched(block: Block): readonly HazardKind[] {
+  if (!isTableBlock(block)) return [];
+  const touched = new Set(block.lines.flatMap((line) => [...hazardsTouchedByLine(block, line)]));
+  for (const kind of hazardsOfBlock(block)) touched.add(kind);
+  return hazardKinds.filter((kind) => touched.has(kind));
+}
+
+/** The hazards that one line touches: what its block's name says, and its own component, name and circuit. */
+export function hazardsTouchedByLine(block: TableBlock, line: Line): readonly HazardKind[] {
+  const touched = new Set(hazardsOfBlock(block));
+  for (const kind of hazardsOfRow(block, line)) touched.add(kind);
+  return hazardKinds.filter((kind) => touched.has(kind));
+}
+
+function hazardsOfBlock(block: TableBlock): readonly HazardKind[] {
+  const named = hazardsNamed(nameOrId(block.name, block.id));
+  const byRole = block.kind === 'switch' ? hazardOfRole[block.role] : undefined;
+  return byRole === undefined ? named : [...named, byRole];
+}
+
+function hazardsOfRow(block: TableBlock, wanted: Line): readonly HazardKind[] {
+  switch (block.kind) {
+    case 'connector':
+    case 'wires':
+      return hazardsNamed(rowIn<{ readonly circuit: string | null } & Line>(block.lines, wanted)?.circuit ?? '');
+    case 'components': {
+      const line = rowIn(block.lines, wanted);
+      if (line === undefined) return [];
+      const byKind = hazardOfComponent[line.componentKind];
+      const named = hazardsNamed(nameOrId(line.name, line.id));
+      return byKind === undefined ? named : [...named, byKind];
+    }
+    case 'checks':
+      return hazardsNamed(rowIn(block.lines, wanted)?.check ?? '');
+    case 'switch':
+    case 'inside':
+      return [];
+  }
+}
+
+function rowIn<Row extends Line>(lines: readonly Row[], wanted: Line): Row | undefined {
+  return lines.find((line) => line.address === wanted.address && line.line === wanted.line);
+}
+
+/** Where something has no name its id is what readers see, so its words count. */
+function nameOrId(name: string | null, id: string | null): string {
+  return name ?? (id ?? '').replace(/-/g, ' ');
+}
+
+/** What a caution is of: what it says itself, else what its words name. */
+export function hazardsOf({ of, text }: HazardBlock): readonly HazardKind[] {
+  return of.length > 0 ? of : hazardsNamed(text);
+}
