@@ -1,8 +1,10 @@
 import type { Answer, Api } from '../shared/contracts/api.ts';
+import { signInBodySchema } from '../shared/contracts/bodies.ts';
+import { readBody } from '../shared/contracts/read-body.ts';
 import type { PreviewView, ProposalView, Viewer } from '../shared/contracts/views.ts';
 import { accept } from '../shared/lib/result.ts';
 import type { Actor, Member } from '../shared/members/member.ts';
-import type { MemberService } from './members/member-service.ts';
+import type { Credentials, MemberService } from './members/member-service.ts';
 import type { PageService } from './pages/page-service-types.ts';
 import type { ProposalService } from './proposals/proposal-service-types.ts';
 import type { SearchService } from './search/search-service.ts';
@@ -21,6 +23,8 @@ export interface Door {
   readonly actor: Actor;
   /** Whose attempts and parsing time are counted together: the network address. */
   readonly address: string;
+  /** Whether somebody is who they say. */
+  prove(credentials: Credentials): Answer<Member>;
   signIn(member: Member): Promise<void>;
   signOut(): Promise<void>;
 }
@@ -49,7 +53,9 @@ export function createLocalApi({ members, pages, proposals, search }: Services, 
       return accept({ member: actor, waiting: proposals.waitingFor(actor) });
     },
     async signIn(body) {
-      const outcome = await members.signIn(body, address);
+      const credentials = readBody(signInBodySchema, body);
+      if (!credentials.ok) return credentials;
+      const outcome = await door.prove(credentials.value);
       if (!outcome.ok) return outcome;
       await door.signIn(outcome.value);
       return accept({ member: outcome.value, waiting: proposals.waitingFor(outcome.value) });

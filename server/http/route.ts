@@ -1,7 +1,7 @@
 import { z } from 'zod';
 import type { Answer } from '../../shared/contracts/api.ts';
 import { problem, type Problem, type ProblemCode } from '../../shared/lib/problem.ts';
-import { refuse, type Result } from '../../shared/lib/result.ts';
+import { accept, refuse, type Result } from '../../shared/lib/result.ts';
 import type { LocalApi } from '../local-api.ts';
 
 /** A request as it came: strings of the path and the query, and whatever the body held. */
@@ -9,6 +9,12 @@ export interface RawInput {
   readonly parameters: unknown;
   readonly query: unknown;
   readonly body: unknown;
+}
+
+/** What a call gives, and where what it made can be read (null where it made nothing). */
+export interface Given {
+  readonly value: unknown;
+  readonly location: string | null;
 }
 
 /**
@@ -31,9 +37,7 @@ export interface Route {
   readonly view: z.ZodType | null;
   /** The refusals that are its own, beside those that any call may meet. */
   readonly problems: readonly ProblemCode[];
-  answer(api: LocalApi, input: RawInput): Answer<unknown>;
-  /** Where what was made can be read; null where nothing was made. */
-  locationOf(value: unknown): string | null;
+  answer(api: LocalApi, input: RawInput): Answer<Given>;
   /** What a write depends on, for `If-Match`; null where it depends on nothing that was read. */
   readonly dependsOn: ((api: LocalApi, input: RawInput) => Answer<unknown>) | null;
 }
@@ -67,7 +71,7 @@ export function defineRoute<
 >(description: RouteDescription<Parameters, Query, Value>): Route {
   const parameters = description.parameters ?? nothing;
   const query = description.query ?? nothing;
-  const { dependsOn, location, view } = description;
+  const { dependsOn, location } = description;
 
   function read(input: RawInput): Result<Input<Parameters, Query>, Problem> {
     const readParameters = parameters.safeParse(input.parameters);
@@ -92,15 +96,13 @@ export function defineRoute<
     query,
     body: description.body ?? null,
     status: description.status ?? 200,
-    view,
+    view: description.view,
     problems: description.problems ?? [],
     async answer(api, input) {
       const asked = read(input);
-      return asked.ok ? description.answer(api, asked.value) : asked;
-    },
-    locationOf(value) {
-      if (location === undefined || view === null) return null;
-      return location(view.parse(value));
+      if (!asked.ok) return asked;
+      const answer = await description.answer(api, asked.value);
+      return answer.ok ? accept({ value: answer.value, location: location?.(answer.value) ?? null }) : answer;
     },
     dependsOn:
       dependsOn === undefined

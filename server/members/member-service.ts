@@ -1,6 +1,6 @@
 import { z } from 'zod';
 import type { Answer } from '../../shared/contracts/api.ts';
-import { passwordBodySchema, signInBodySchema } from '../../shared/contracts/bodies.ts';
+import { passwordBodySchema, type signInBodySchema } from '../../shared/contracts/bodies.ts';
 import { readBody } from '../../shared/contracts/read-body.ts';
 import { problem, type Problem } from '../../shared/lib/problem.ts';
 import { accept, refuse } from '../../shared/lib/result.ts';
@@ -13,6 +13,9 @@ import { createMemberStore } from './member-store.ts';
 import { hashPassword, verifyPassword } from './passwords.ts';
 import { createSessionStore } from './session-store.ts';
 
+/** What somebody says to prove who they are. */
+export type Credentials = z.output<typeof signInBodySchema>;
+
 /** The members of the club: who they are, and their proof of it. */
 export interface MemberService {
   /** Null for who is not (or no longer) a member, and for who is suspended: neither is signed in. */
@@ -21,7 +24,7 @@ export interface MemberService {
    * Whether somebody is who they say. The answer and the time it takes are the same for an unknown e-mail address and
    * a wrong password; guessing is slowed by e-mail address and network address together.
    */
-  signIn(body: unknown, networkAddress: string): Answer<Member>;
+  signIn(credentials: Credentials, networkAddress: string): Answer<Member>;
   /** Changes one's own password, and ends every session of the member, the asking one too. */
   changePassword(actor: Actor, body: unknown, networkAddress: string): Answer<Member>;
   /** Takes somebody into the club. Not guarded: for the seed and the administrator's command. */
@@ -85,12 +88,10 @@ export function createMemberService({ database, now, newId }: MemberServiceParts
       return member === null || member.suspended ? null : member;
     },
 
-    async signIn(body, networkAddress) {
-      const read = readBody(signInBodySchema, body);
-      if (!read.ok) return read;
-      const email = foldEmail(read.value.email);
+    async signIn(credentials, networkAddress) {
+      const email = foldEmail(credentials.email);
       const known = store.getByEmail(email);
-      const refusal = await prove(known?.passwordHash ?? null, read.value.password, {
+      const refusal = await prove(known?.passwordHash ?? null, credentials.password, {
         one: `${email} ${networkAddress}`,
         all: networkAddress,
       });

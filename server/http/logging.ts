@@ -1,0 +1,23 @@
+import { randomUUID } from 'node:crypto';
+import type { RequestHandler } from 'express';
+import { pino, type Logger } from 'pino';
+import { pinoHttp } from 'pino-http';
+import type { Settings } from '../config/settings.ts';
+
+/** The server's log: lines of JSON on the standard output, never a cookie or a password. */
+export function createLogger({ logLevel }: Pick<Settings, 'logLevel'>): Logger {
+  return pino({ level: logLevel, redact: ['req.headers.cookie', 'req.headers.authorization', 'res.headers["set-cookie"]'] });
+}
+
+/** Gives each request an id, in the log and as `X-Request-Id`, so that a report can be found. */
+export function logRequests(logger: Logger): RequestHandler {
+  return pinoHttp({
+    logger,
+    genReqId: (_, response) => {
+      const id = randomUUID();
+      response.setHeader('X-Request-Id', id);
+      return id;
+    },
+    customLogLevel: (_, response, error) => (error !== undefined || response.statusCode >= 500 ? 'error' : 'info'),
+  });
+}

@@ -1,0 +1,107 @@
+import type { IncomingMessage, ServerResponse } from 'node:http';
+import type { KeptPage, KeptPages } from '../pages/kept-pages.ts';
+import { chooseEncoding, isReading, publicCache, vary } from './representation.ts';
+
+/** Pages that every visitor sees alike, answered from memory. */
+export interface VisitorPages {
+  /** Answers a visitor's request for a page that is kept; false where it is not. */
+  send(request: IncomingMessage, response: ServerResponse): boolean;
+  /** Under which key the page of this request may be kept; null where it may not. */
+  keyOf(request: IncomingMessage): string | null;
+  /** Ask before a page is rendered, and give it to `keep`. */
+  generation(): number;
+  /** Keeps a page that was rendered for this key, and sends it. */
+  keepAndSend(key: string, html: string, generation: number, request: IncomingMessage, response: ServerResponse): void;
+}
+
+const variantNames: readonly string[] = ['year', 'market', 'frame'];
+/** What of a visitor's own choices a page is made with (src/lib/bench.ts). */
+const choiceCookies: readonly string[] = ['bench', 'variant', 'face'];
+const longestKey = 300;
+
+/**
+ * @param sessionCookie whoever has it may be a member
+ * @param securityHeaders what every answer carries
+ */
+export function createVisitorPages(
+  kept: KeptPages,
+  sessionCookie: string,
+  securityHeaders: Readonly<Record<string, string>>,
+): VisitorPages {
+  const headers = {
+    ...securityHeaders,
+    'Content-Type': 'text/html; charset=utf-8',
+    'Cache-Control': publicCache,
+    Vary: vary,
+  };
+
+  function keyOf(request: IncomingMessage): string | null {
+    if (!isReading(request)) return null;
+    const { url = '', headers: asked } = request;
+    const address = url.includes('?') ? canonicalAddress(url) : url;
+    if (address === null) return null;
+    const choices = asked.cookie === undefined ? '' : choicesOf(asked.cookie, sessionCookie);
+    if (choices === null) return null;
+    const key = choices === '' ? address : `${address} ${choices}`;
+    return key.length > longestKey ? null : key;
+  }
+
+  function sendPage(page: KeptPage, request: IncomingMessage, response: ServerResponse): void {
+    const known = request.headers['if-none-match'];
+    if (known?.includes(page.etag) === true || known === '*') {
+      response.writeHead(304, { ...page.headers, ETag: page.etag }).end();
+      return;
+    }
+    const wanted = chooseEncoding(request.headers['accept-encoding']);
+    const compressed = wanted === 'br' ? page.brotli : wanted === 'gzip' ? page.gzip : null;
+    const body = compressed ?? page.identity;
+    response.writeHead(200, {
+      ...page.headers,
+      ETag: page.etag,
+      'Content-Length': body.length,
+      ...(compressed === null ? {} : { 'Content-Encoding': wanted }),
+    });
+    response.end(request.method === 'HEAD' ? undefined : body);
+  }
+
+  return {
+    keyOf,
+    generation: () => kept.generation(),
+    send(request, response) {
+      const key = keyOf(request);
+      const page = key === null ? null : kept.get(key);
+      if (page === null) return false;
+      sendPage(page, request, response);
+      return true;
+    },
+    keepAndSend(key, html, generation, request, response) {
+      sendPage(kept.put(key, html, headers, generation), request, response);
+    },
+  };
+}
+
+/** The address with the variant in one order, so that one page is kept once; null where the query asks for more. */
+function canonicalAddress(url: string): string | null {
+  const at = url.indexOf('?');
+  const asked = new URLSearchParams(url.slice(at + 1));
+  const canonical = new URLSearchParams();
+  for (const name of variantNames) {
+    const [value, ...more] = asked.getAll(name);
+    if (more.length > 0) return null;
+    if (value !== undefined) canonical.set(name, value);
+  }
+  if (asked.size !== canonical.size) return null;
+  return canonical.size === 0 ? url.slice(0, at) : `${url.slice(0, at)}?${canonical.toString()}`;
+}
+
+/** The choices of a `Cookie` header in one order; null where it has a session. */
+function choicesOf(cookies: string, sessionCookie: string): string | null {
+  const choices: string[] = [];
+  for (const pair of cookies.split(';')) {
+    const cookie = pair.trim();
+    const name = cookie.slice(0, cookie.indexOf('='));
+    if (name === sessionCookie) return null;
+    if (choiceCookies.includes(name)) choices.push(cookie);
+  }
+  return choices.sort().join(' ');
+}
