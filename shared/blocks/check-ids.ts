@@ -22,15 +22,19 @@ interface DeclaredId {
  * @param overlays true for safe modifications, where an id that the donor has takes its place on purpose
  */
 export function checkIds(blocks: readonly Block[], context: IdsElsewhere, overlays: boolean): readonly Finding[] {
-  const declared = blocks.flatMap(declaredIds);
-  const repeated = declared.flatMap((one, at) => {
-    const earlier = declared.slice(0, at).find((other) => other.id === one.id && !areDisjoint(one.applies, other.applies));
-    return earlier === undefined ? [] : [repeatedId(one, `on line ${earlier.line} of this page`)];
-  });
-  const elsewhere = overlays ? [] : declared.flatMap((one) => {
-    const other = context.idsElsewhere.find(({ id }) => id === one.id);
-    return other === undefined ? [] : [repeatedId(one, `on the page ${other.page}`)];
-  });
+  const byId = new Map<string, DeclaredId[]>();
+  const pageOf = new Map(overlays ? [] : context.idsElsewhere.map(({ id, page }) => [id, page]));
+  const repeated: Finding[] = [];
+  const elsewhere: Finding[] = [];
+  for (const one of blocks.flatMap(declaredIds)) {
+    const earlier = byId.get(one.id) ?? [];
+    const clash = earlier.find((other) => !areDisjoint(one.applies, other.applies));
+    if (clash !== undefined) repeated.push(repeatedId(one, `on line ${clash.line} of this page`));
+    const page = pageOf.get(one.id);
+    if (page !== undefined) elsewhere.push(repeatedId(one, `on the page ${page}`));
+    if (earlier.length === 0) byId.set(one.id, [one]);
+    else earlier.push(one);
+  }
   const known = new Set(repeated.map(({ line }) => line));
   return [...repeated, ...elsewhere, ...repeatedAddresses(blocks).filter(({ line }) => !known.has(line))];
 }

@@ -3,8 +3,9 @@ import type { Applicability } from '../pages/applicability.ts';
 import { formatYears } from '../pages/years.ts';
 import type { WireSize } from '../electrics/wire-sizes.ts';
 import type {
-  CheckLine, ComponentLine, ConnectorLine, InsideLine, Line, SwitchLine, TableBlock, TerminalName, WireLine, WrittenColour,
+  CheckLine, ComponentLine, ConnectorLine, InsideLine, SwitchLine, TableBlock, TerminalName, WireLine, WrittenColour,
 } from './block.ts';
+import type { TableLine } from './lines.ts';
 import type { Rating } from './rating.ts';
 import { formatTerminalName } from './terminal-name.ts';
 
@@ -13,33 +14,18 @@ type Claim = readonly unknown[];
 /**
  * What a line claims, as canonical text: its terminals, its electrical cells and what it holds for; not its note, its
  * source, its name or its place. Two ways of writing one thing (`YR`, `Y/R`; `0.85`, `0,85 mm²`) claim the same.
- * @throws RangeError where the line is not the block's
  */
-export function claimOf(block: TableBlock, line: Line): string {
-  return JSON.stringify([block.kind, ...claimIn(block, line), claimedApplicability(line.applies)]);
+export function claimOf(block: TableBlock, line: TableLine): string {
+  return JSON.stringify([block.kind, ...claimIn(block.id ?? '', line), claimedApplicability(line.applies)]);
 }
 
-function claimIn(block: TableBlock, line: Line): Claim {
-  switch (block.kind) {
-    case 'connector':
-      return connectorClaim(block.id, requireLine(block.lines, line));
-    case 'components':
-      return componentClaim(requireLine(block.lines, line));
-    case 'switch':
-      return switchClaim(block.id, requireLine(block.lines, line));
-    case 'wires':
-      return wireClaim(requireLine(block.lines, line));
-    case 'inside':
-      return insideClaim(block.id, requireLine(block.lines, line));
-    case 'checks':
-      return checkClaim(requireLine(block.lines, line));
-  }
-}
-
-function requireLine<Row extends Line>(lines: readonly Row[], wanted: Line): Row {
-  const found = lines.find((line) => line.address === wanted.address && line.line === wanted.line);
-  if (found === undefined) throw new RangeError(`The block has no line ${wanted.address}`);
-  return found;
+function claimIn(blockId: string, line: TableLine): Claim {
+  if ('cavity' in line) return connectorClaim(blockId, line);
+  if ('componentKind' in line) return componentClaim(line);
+  if ('position' in line) return switchClaim(blockId, line);
+  if ('removed' in line) return wireClaim(line);
+  if ('check' in line) return checkClaim(line);
+  return insideClaim(blockId, line);
 }
 
 function connectorClaim(id: string, line: ConnectorLine): Claim {

@@ -9,10 +9,16 @@ import { formatTable } from './table-source.ts';
 export function formatBlock(source: SourceBlock): string {
   const { name, table, text } = source;
   const opening = `${name}${formatAttributes(source)}`;
-  const inside = [table === null ? '' : formatTable(table), text.replace(/^(?:[ \t]*[\r\n])+|\s+$/g, '')].filter((part) => part !== '');
+  const inside = [table === null ? '' : formatTable(table), withoutEmptyEnds(text)].filter((part) => part !== '');
   if (name === 'calculator' && inside.length === 0) return `::${opening}`;
   const fence = ':'.repeat(Math.max(3, longestFence(text) + 1));
   return [`${fence}${opening}`, ...(inside.length === 0 ? [] : [inside.join('\n\n')]), fence].join('\n');
+}
+
+function withoutEmptyEnds(text: string): string {
+  const lines = text.trimEnd().split(/\r\n|\n|\r/);
+  const first = lines.findIndex((line) => line.trim() !== '');
+  return lines.slice(Math.max(0, first)).join('\n');
 }
 
 function formatAttributes({ id, attributes }: SourceBlock): string {

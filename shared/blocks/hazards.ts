@@ -1,11 +1,21 @@
-import { hazardKinds, type Block, type ComponentKind, type HazardBlock, type HazardKind, type Line, type SwitchRole, type TableBlock } from './block.ts';
-import { isTableBlock } from './lines.ts';
+import {
+  componentKinds,
+  hazardKinds,
+  type Block,
+  type ComponentKind,
+  type HazardBlock,
+  type HazardKind,
+  type Line,
+  type SwitchRole,
+  type TableBlock,
+} from './block.ts';
+import { isTableBlock, linesOf } from './lines.ts';
 
 /** The words by which a circuit, a name or a heading touches a hazard; whole words, plural too. */
 const hazardWords: Readonly<Record<HazardKind, readonly string[]>> = {
   battery: ['battery', 'main fuse'],
   starter: ['starter', 'start relay', 'start button'],
-  ignition: ['ignition coil', 'igniter', 'pickup', 'pick up', 'kill switch'],
+  ignition: ['ignition coil', 'igniter', 'pick-?up', 'kill switch'],
   charging: ['alternator', 'dynamo', 'regulator'],
   fuel: ['fuel pump', 'fuel tap', 'fuel sender', 'tank'],
   brakes: ['brake lamp', 'brake switch', 'headlamp', 'indicator'],
@@ -46,15 +56,15 @@ export function hazardsNamed(text: string): readonly HazardKind[] {
 /** The hazards that a block touches: by its components, its names and its circuits. A caution and a sum touch none. */
 export function hazardsTouched(block: Block): readonly HazardKind[] {
   if (!isTableBlock(block)) return [];
-  const touched = new Set(block.lines.flatMap((line) => [...hazardsTouchedByLine(block, line)]));
-  for (const kind of hazardsOfBlock(block)) touched.add(kind);
+  const touched = new Set(hazardsOfBlock(block));
+  for (const line of linesOf(block)) for (const kind of hazardsOfRow(line)) touched.add(kind);
   return hazardKinds.filter((kind) => touched.has(kind));
 }
 
 /** The hazards that one line touches: what its block's name says, and its own component, name and circuit. */
 export function hazardsTouchedByLine(block: TableBlock, line: Line): readonly HazardKind[] {
   const touched = new Set(hazardsOfBlock(block));
-  for (const kind of hazardsOfRow(block, line)) touched.add(kind);
+  for (const kind of hazardsOfRow(line)) touched.add(kind);
   return hazardKinds.filter((kind) => touched.has(kind));
 }
 
@@ -64,28 +74,19 @@ function hazardsOfBlock(block: TableBlock): readonly HazardKind[] {
   return byRole === undefined ? named : [...named, byRole];
 }
 
-function hazardsOfRow(block: TableBlock, wanted: Line): readonly HazardKind[] {
-  switch (block.kind) {
-    case 'connector':
-    case 'wires':
-      return hazardsNamed(rowIn<{ readonly circuit: string | null } & Line>(block.lines, wanted)?.circuit ?? '');
-    case 'components': {
-      const line = rowIn(block.lines, wanted);
-      if (line === undefined) return [];
-      const byKind = hazardOfComponent[line.componentKind];
-      const named = hazardsNamed(nameOrId(line.name, line.id));
-      return byKind === undefined ? named : [...named, byKind];
-    }
-    case 'checks':
-      return hazardsNamed(rowIn(block.lines, wanted)?.check ?? '');
-    case 'switch':
-    case 'inside':
-      return [];
-  }
+/** What a row says by the properties that it has: only components have a kind, only checks are named `check`. */
+function hazardsOfRow(line: Line): readonly HazardKind[] {
+  if ('circuit' in line) return hazardsNamed(textOf(line.circuit));
+  if ('check' in line) return hazardsNamed(textOf(line.check));
+  if (!('componentKind' in line) || !('name' in line) || !('id' in line)) return [];
+  const named = hazardsNamed(nameOrId(line.name === null ? null : textOf(line.name), textOf(line.id)));
+  const componentKind = componentKinds.find((kind) => kind === line.componentKind);
+  const byKind = componentKind === undefined ? undefined : hazardOfComponent[componentKind];
+  return byKind === undefined ? named : [...named, byKind];
 }
 
-function rowIn<Row extends Line>(lines: readonly Row[], wanted: Line): Row | undefined {
-  return lines.find((line) => line.address === wanted.address && line.line === wanted.line);
+function textOf(value: unknown): string {
+  return typeof value === 'string' ? value : '';
 }
 
 /** Where something has no name its id is what readers see, so its words count. */

@@ -1,4 +1,7 @@
-import type { Block, Line, TableBlock } from './block.ts';
+import type { Block, TableBlock } from './block.ts';
+
+/** A line of any kind of block. */
+export type TableLine = TableBlock['lines'][number];
 
 /** True where a block has lines. */
 export function isTableBlock(block: Block): block is TableBlock {
@@ -11,7 +14,7 @@ export function tableBlocks(blocks: readonly Block[]): readonly TableBlock[] {
 }
 
 /** A block's lines in the order of its table; a caution and a sum have none. */
-export function linesOf(block: Block): readonly Line[] {
+export function linesOf(block: Block): readonly TableLine[] {
   return isTableBlock(block) ? block.lines : [];
 }
 

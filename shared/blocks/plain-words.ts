@@ -7,9 +7,9 @@ const fence = /^\s*(:{3,})(.*)$/;
 export function plainWords(markdown: string): string {
   return linesOutsideDirectives(markdown)
     .join(' ')
-    .replace(/!?\[([^\]]*)\]\([^)]*\)/g, '$1')
-    .replace(/<\/?[a-z][^>]*>/gi, '')
-    .replace(/(\*\*|__|~~|\*|`+)(\S(?:.*?\S)?)\1/g, '$2')
+    .replace(/!?\[([^[\]]{0,300})\]\([^()]{0,300}\)/g, '$1')
+    .replace(/<\/?[a-z][^<>]{0,300}>/gi, '')
+    .replace(/(\*\*|__|~~|\*|`)(\S(?:.{0,300}?\S)?)\1/g, '$2')
     .replace(/\\([!-/:-@[-`{-~])/g, '$1')
     .replace(/\s+/g, ' ')
     .trim();

@@ -21,6 +21,9 @@ const headings: HeadingNames<CheckColumn> = {
 const expected =
   'a range (100–130 Ω), a tolerance (5 ± 0.5 Ω, 5 ± 10 % Ω), a limit (< 0.2 V, max 5 Ω), `continuity` or `open`';
 
+/** A place in words may be a sentence; two terminals are shorter. */
+const longestPlace = 200;
+
 /** Reads a table of checks, a line each. */
 export function readChecks(source: SourceBlock): BlockReading {
   const findings: Finding[] = [];
@@ -69,6 +72,7 @@ export function readChecks(source: SourceBlock): BlockReading {
  * None where it names a place in words.
  */
 export function readBetween(text: string): readonly TerminalName[] {
+  if (text.length > longestPlace) return [];
   const parts = text.split(/\s+[-–—]\s+|\s*[–—]\s*|\s+(?:and|to)\s+|\s*[,;]\s*/).filter((part) => part !== '');
   const names = parts.map(readTerminalName).filter((name) => name !== null);
   const allNamed = names.every(({ id, terminal }) => isSlug(id) && !(terminal ?? '').includes(' '));

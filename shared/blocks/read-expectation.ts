@@ -1,6 +1,7 @@
 import { readDecimal } from '../lib/decimal.ts';
 import type { Expectation } from './expectation.ts';
 
+const longestWritten = 80;
 const number = String.raw`[-−]?(?:\d+(?:[.,]\d+)?|[.,]\d+)`;
 /** Units that a workshop measures in; anything else after a figure is not an expectation. */
 const unit = String.raw`(?:[kMm]?(?:Ω|ohms?|Ohms?)|[mk]?V|v|[mµμ]?A|a|[mk]?W|m?Ah|[kM]?Hz|rpm|r/min|min⁻¹|1/min|°C|°F|K|°|deg(?:rees)?|%|[munpµμ]?F|[mµμ]?H|[mµμ]?s|µm|mm|cm|m|in|bar|k?Pa|psi|N·?m|kg|g|ml|[lL]|lx|cd)(?:\s*(?:AC|DC|peak|rms))?`;
@@ -17,6 +18,7 @@ const limitAfter = new RegExp(`^(${number})\\s*(${unit})\\s*(max\\.?|maximum|min
  */
 export function readExpectation(text: string): Expectation | null {
   const plain = text.trim().replace(/\s+/g, ' ').replaceAll('\u2126', 'Ω');
+  if (plain.length > longestWritten) return null;
   if (/^continuity$/i.test(plain)) return { kind: 'continuity' };
   if (/^open(?: circuit)?$/i.test(plain)) return { kind: 'open' };
   return readRange(plain) ?? readTolerance(plain) ?? readLimit(plain);

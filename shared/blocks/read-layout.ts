@@ -3,11 +3,14 @@ import type { FaceLayout } from './face-layout.ts';
 /** The most cavities that a face may have; more is a slip of the pen. */
 export const mostCavities = 200;
 
+const longestWritten = 400;
+
 /**
  * Reads a connector's layout: rows × columns (`2x3`), one row (`5`), cavities row by row (`3+4`), rows with gaps
  * (`xx.xx+xxxxx`), or a ring (`round 6`). Null where it is none of these or has no cavity or more than 200.
  */
 export function readLayout(text: string): FaceLayout | null {
+  if (text.length > longestWritten) return null;
   const plain = text.trim().toLowerCase().replace(/\s*([x×+.])\s*/g, '$1');
   const ring = /^round (\d{1,3})$/.exec(plain.replace(/\s+/g, ' '));
   if (ring !== null) {

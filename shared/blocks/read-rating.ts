@@ -10,6 +10,11 @@ const feedPattern = new RegExp(`(?:^|[,;]\\s*|\\s)([\\p{L}][\\p{L}\\p{N} -]*?)\\
 /** Words before a figure that do not name a feed. */
 const notFeeds = new Set(['blow', 'blows', 'blowing', 'continuous', 'max', 'min', 'fuse', 'rated', 'about', 'approx', 'bulb', 'bulbs', 'v', 'a', 'w', 'ah', 'x']);
 
+/** A rating is a few figures; a longer text is a note in the wrong column. */
+const longestWritten = 200;
+const volts = new RegExp(`${number}\\s*V(?![\\p{L}\\p{N}])`, 'giu');
+const nothingRead = { volts: null, amps: null, watts: null, ohms: null, ampHours: null } as const;
+
 type Feed = Rating['feeds'][number];
 
 /**
@@ -19,10 +24,11 @@ type Feed = Rating['feeds'][number];
  * continuous one counts.
  */
 export function readRating(text: string): Rating | null {
-  const written = text.trim().replaceAll('\u2126', 'Ω');
+  const written = text.trim().replace(/\s+/g, ' ').replaceAll('\u2126', 'Ω');
   if (written === '') return null;
+  if (written.length > longestWritten) return { written, ...nothingRead, blow: false, feeds: [] };
   const figures = readFigures(written);
-  const feeds = readFeeds(written);
+  const feeds = readFeeds(written.replace(volts, ''));
   const continuous = new RegExp(`continuous\\s+(${number})\\s*A|(${number})\\s*A\\s+continuous`, 'i').exec(written);
   const continuousAmps = continuous === null ? null : numberOf(continuous[1] ?? continuous[2] ?? '');
   return {
@@ -46,7 +52,7 @@ interface Figures {
 }
 
 function readFigures(text: string): Figures {
-  const figures: Figures = { volts: null, amps: null, watts: null, ohms: null, ampHours: null };
+  const figures: Figures = { ...nothingRead };
   for (const [, times, written, unitWritten] of text.matchAll(quantityPattern)) {
     const { what, factor } = readUnit(unitWritten ?? '');
     const value = numberOf(written ?? '');

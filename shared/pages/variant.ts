@@ -73,10 +73,19 @@ function hasName(names: readonly string[], wanted: string): boolean {
 export function choicesOf(all: readonly Applicability[]): Choices {
   const years = all.flatMap((one) => one.years.flatMap(({ from, to }) => [from, to])).filter((year) => year !== null);
   return {
-    years: years.length === 0 ? null : { from: Math.min(...years), to: Math.max(...years) },
+    years: spanOf(years),
     markets: distinctNames(all.flatMap(({ markets }) => markets)),
     frames: distinctNames(all.flatMap(({ frames }) => frames)),
   };
+}
+
+function spanOf(years: readonly number[]): Choices['years'] {
+  const [first, ...others] = years;
+  if (first === undefined) return null;
+  return others.reduce((span, year) => ({ from: Math.min(span.from, year), to: Math.max(span.to, year) }), {
+    from: first,
+    to: first,
+  });
 }
 
 function distinctNames(names: readonly string[]): readonly string[] {

@@ -12,10 +12,7 @@ function row(code: string, colour: ColourName, ...otherSpellings: readonly strin
   return { code, colour, otherSpellings };
 }
 
-/*
- * Japanese letters: common practice, recalled from lists in the manner of JASO D 607; no single published source.
- * `Lb` for sky blue stands in some of those lists.
- */
+/* Japanese letters: common practice, recalled from lists in the manner of JASO D 607; no single published source. */
 const jis: readonly ColourCode[] = [
   row('B', 'black'),
   row('Br', 'brown'),
@@ -28,7 +25,7 @@ const jis: readonly ColourCode[] = [
   row('O', 'orange'),
   row('P', 'pink'),
   row('R', 'red'),
-  row('Sb', 'light blue', 'Lb'),
+  row('Sb', 'light blue'),
   row('V', 'violet'),
   row('W', 'white'),
   row('Y', 'yellow'),

@@ -9,6 +9,7 @@ interface Spelling {
 }
 
 const longestWritten = 80;
+const capitalThenSmall = /\p{Lu}\p{Ll}/u;
 const fillerWords = new Set(['with', 'and', 'a', 'an', 'the', 'stripe', 'striped', 'stripes', 'tracer', 'trace', 'line', 'wire', 'base']);
 
 /**
@@ -41,10 +42,9 @@ function spellingsOf(system: ColourSystem): readonly Spelling[] {
 
 /** Every wire that letters without anything between them can mean. */
 function readJoined(text: string, spellings: readonly Spelling[], exactCase: boolean): readonly WireColour[] {
-  const exact = wiresSpelled(text, spellings, (a, b) => a === b);
-  // A lower-case letter shows that the writer kept the system's own case, so `Br` is brown and nothing else.
-  if (exactCase && exact.length > 0 && text !== text.toUpperCase()) return exact;
-  return wiresSpelled(text, spellings, sameButForCase);
+  const mayIgnoreCase = !exactCase || !capitalThenSmall.test(text);
+  // A capital and a small letter after it are one code: `Br` is brown and nothing else, and `Lb` is not blue with black.
+  return wiresSpelled(text, spellings, mayIgnoreCase ? sameButForCase : (a, b) => a === b);
 }
 
 function sameButForCase(a: string, b: string): boolean {
@@ -96,11 +96,12 @@ function readColours(tokens: readonly string[], spellings: readonly Spelling[]):
   const colours: ColourName[] = [];
   for (let at = 0; at < tokens.length; at += 1) {
     const token = tokens[at] ?? '';
-    const pair = colourOfWords(`${token} ${tokens[at + 1] ?? ''}`);
-    const colour = pair ?? readSingle(token, spellings);
+    const next = tokens[at + 1];
+    const ofTwoWords = next === undefined ? null : colourOfWords(`${token} ${next}`);
+    const colour = ofTwoWords ?? readSingle(token, spellings);
     if (colour !== null) colours.push(colour);
     else if (!fillerWords.has(token.toLowerCase())) return null;
-    if (pair !== null && tokens[at + 1] !== undefined && colourOfWords(token) !== pair) at += 1;
+    if (ofTwoWords !== null) at += 1;
   }
   return colours;
 }
