@@ -4,6 +4,7 @@ import { createHash } from 'node:crypto';
 import { existsSync, mkdirSync, readdirSync, readFileSync, statSync, writeFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { fileURLToPath } from 'node:url';
+import { compressFiles } from './compress.mjs';
 
 export const root = fileURLToPath(new URL('..', import.meta.url));
 const stamps = join(root, '.cache');
@@ -73,6 +74,7 @@ export function ensureBuild() {
   console.log('Building …');
   const vite = join(root, 'node_modules', 'vite', 'bin', 'vite.js');
   run(process.execPath, [vite, 'build', '--logLevel', 'warn']);
+  compressFiles(join(root, 'dist', 'client'));
   run(process.execPath, [vite, 'build', '--ssr', '--logLevel', 'warn']);
   setStamp('build', sources);
 }
