@@ -45,7 +45,11 @@ export function drawFace(face: Face, look: FaceLook): Drawing {
       role: 'group',
       'aria-label': `${look.title}, ${says.toLowerCase()}`,
     },
-    element('text', { class: 'face-side-name', x: plan.width / 2, y: 18, 'text-anchor': 'middle' }, says),
+    element(
+      'text',
+      { class: 'face-side-name', x: plan.width / 2, y: 18, 'text-anchor': 'middle', fill: 'currentColor' },
+      says,
+    ),
     ...drawHousing(plan),
     ...drawn,
     face.oriented ? null : notConfirmed(plan),
@@ -94,7 +98,7 @@ function notConfirmed(plan: FacePlan): Drawing {
   const middle = plan.width / 2;
   return element(
     'text',
-    { class: 'face-unconfirmed', x: middle, y: plan.height - 30, 'text-anchor': 'middle' },
+    { class: 'face-unconfirmed', x: middle, y: plan.height - 30, 'text-anchor': 'middle', fill: 'currentColor' },
     element('tspan', { x: middle }, 'Numbering not confirmed:'),
     element('tspan', { x: middle, dy: 18 }, 'go by the colours'),
   );

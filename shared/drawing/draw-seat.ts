@@ -77,7 +77,13 @@ function emptySeat(x: number, y: number, name: string, blank: boolean): Drawing[
       : []),
     element(
       'text',
-      { class: 'seat-number on-paper', x: x + seatSize / 2, y: y + seatSize / 2 + 5, 'text-anchor': 'middle' },
+      {
+        class: 'seat-number on-paper',
+        x: x + seatSize / 2,
+        y: y + seatSize / 2 + 5,
+        'text-anchor': 'middle',
+        fill: 'currentColor',
+      },
       name,
     ),
   ];
@@ -101,7 +107,8 @@ function filledSeat(x: number, y: number, name: string, wires: readonly FaceWire
   const base = shown[0]?.colour?.base;
   const ink = base === undefined ? 'currentColor' : letterInk(base);
   const number = element('text', { class: 'seat-number', x: x + 5, y: y + 14, fill: ink }, name);
-  const more = wires.length > 3 ? element('text', { class: 'seat-more', x: x + seatSize + 2, y: y + seatSize - 2 }, '…') : null;
+  const place = { x: x + seatSize + 2, y: y + seatSize - 2 };
+  const more = wires.length > 3 ? element('text', { class: 'seat-more', ...place, fill: 'currentColor' }, '…') : null;
   return [...bands, ...dividers, number, ...(more === null ? [] : [more])];
 }
 
