@@ -3,9 +3,12 @@ import { describe, expect, it } from 'vitest';
 import { readWireSize } from './wire-sizes.ts';
 
 describe('readWireSize', () => {
-  it.each(['0.85', '0,85', '0.85 mm²', '0.85mm2', '0.85 sq', '0.85 sqmm', ' .85 '])('reads %j as 0.85 mm²', (written) => {
-    expect(readWireSize(written)?.squareMillimetres).toBe(0.85);
-  });
+  it.each(['0.85', '0,85', '0.85 mm²', '0.85mm2', '0.85 sq', '0.85 sqmm', ' .85 '])(
+    'reads %j as 0.85 mm²',
+    (written) => {
+      expect(readWireSize(written)?.squareMillimetres).toBe(0.85);
+    },
+  );
 
   it.each(['AWG 18', '18 AWG', 'awg18', 'AWG #18'])('reads %j as a gauge', (written) => {
     expect(readWireSize(written)?.squareMillimetres).toBeCloseTo(0.823, 3);

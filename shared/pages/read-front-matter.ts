@@ -80,7 +80,9 @@ export function readFrontMatter(yaml: string, firstLine: number): FrontMatterRea
     return { frontMatter: emptyFrontMatter, findings: [finding('block-unreadable', message, firstLine)] };
   }
   const reader = new FieldReader(values, lineOfFields(document.contents, lineAt, firstLine));
-  return { frontMatter: reader.read(), findings: [...findings, ...reader.findings] };
+  const frontMatter = reader.read();
+  // Where the YAML itself is wrong, its fields are wrong because of that: one finding is enough.
+  return { frontMatter, findings: findings.length > 0 ? findings : reader.findings };
 }
 
 type Fields = Readonly<Record<string, unknown>>;
@@ -89,7 +91,11 @@ function isFields(value: unknown): value is Fields {
   return typeof value === 'object' && value !== null && !Array.isArray(value);
 }
 
-function lineOfFields(map: YAMLMap, lineAt: (offset: number) => number, firstLine: number): ReadonlyMap<string, number> {
+function lineOfFields(
+  map: YAMLMap,
+  lineAt: (offset: number) => number,
+  firstLine: number,
+): ReadonlyMap<string, number> {
   const lines = new Map<string, number>();
   for (const { key } of map.items) {
     const offset = isNode(key) ? key.range?.[0] : undefined;
@@ -130,7 +136,8 @@ class FieldReader {
 
   #text(field: string): string | null {
     const text = textOf(this.#fields[field]);
-    if (text === undefined) this.#complain(field, `In the front matter \`${field}\` should be words, not a list or fields.`);
+    if (text === undefined)
+      this.#complain(field, `In the front matter \`${field}\` should be words, not a list or fields.`);
     return text ?? null;
   }
 
@@ -139,7 +146,10 @@ class FieldReader {
     if (text === null) return null;
     const found = names.find((name) => name === text.toLowerCase());
     if (found === undefined) {
-      this.#complain(field, `In the front matter \`${field}: ${text}\` is not known. Write one of ${names.join(', ')}.`);
+      this.#complain(
+        field,
+        `In the front matter \`${field}: ${text}\` is not known. Write one of ${names.join(', ')}.`,
+      );
     }
     return found ?? null;
   }
@@ -147,7 +157,8 @@ class FieldReader {
   #names(field: string, value: unknown): string | null {
     if (!Array.isArray(value)) {
       const text = textOf(value);
-      if (text === undefined) this.#complain(field, `In the front matter \`${field}\` should be names with commas between them.`);
+      if (text === undefined)
+        this.#complain(field, `In the front matter \`${field}\` should be names with commas between them.`);
       return text ?? null;
     }
     return value.map((entry: unknown) => textOf(entry) ?? '').join(',');
@@ -157,7 +168,10 @@ class FieldReader {
     const value = this.#fields['applies'];
     if (value === undefined || value === null) return appliesToAll;
     if (!isFields(value)) {
-      this.#complain('applies', 'In the front matter `applies` should hold `years`, `markets` or `frames`: `applies: {years: 1978-1981}`.');
+      this.#complain(
+        'applies',
+        'In the front matter `applies` should hold `years`, `markets` or `frames`: `applies: {years: 1978-1981}`.',
+      );
       return appliesToAll;
     }
     const { applies, unreadableYears } = readApplicability({
@@ -166,7 +180,10 @@ class FieldReader {
       frames: this.#names('applies', value['frames']),
     });
     if (unreadableYears !== null) {
-      this.#complain('applies', `The years \`${unreadableYears}\` cannot be read. Write them as 1978, 1978-1981, 1980- or -1979.`);
+      this.#complain(
+        'applies',
+        `The years \`${unreadableYears}\` cannot be read. Write them as 1978, 1978-1981, 1980- or -1979.`,
+      );
     }
     return applies;
   }
@@ -188,7 +205,11 @@ class FieldReader {
     for (const [code, value] of Object.entries(key)) {
       const colour = colourOfWords(textOf(value) ?? '');
       if (colour !== null) read.push([code, colour]);
-      else this.#complain('colour-key', `In the colour key \`${code}\` should be a colour in words, as in \`${code}: light green\`.`);
+      else
+        this.#complain(
+          'colour-key',
+          `In the colour key \`${code}\` should be a colour in words, as in \`${code}: light green\`.`,
+        );
     }
     return Object.fromEntries(read);
   }

@@ -16,8 +16,21 @@ function read(base: WireColour['base'], tracer: WireColour['tracer'] = null): Co
 
 describe('readWireColour', () => {
   it.each([
-    'Y/R', 'YR', 'Y-R', 'Y R', 'Y\\R', 'Y / R', 'y/r', 'yr', 'yellow/red', 'yellow-red', 'Yellow Red',
-    'yellow with a red stripe', 'yellow, red tracer', 'red stripe on yellow', 'yellow/R',
+    'Y/R',
+    'YR',
+    'Y-R',
+    'Y R',
+    'Y\\R',
+    'Y / R',
+    'y/r',
+    'yr',
+    'yellow/red',
+    'yellow-red',
+    'Yellow Red',
+    'yellow with a red stripe',
+    'yellow, red tracer',
+    'red stripe on yellow',
+    'yellow/R',
   ])('reads %j as yellow with a red tracer', (written) => {
     expect(readWireColour(written, jis)).toEqual({ kind: 'read', colour: yellowRed });
   });

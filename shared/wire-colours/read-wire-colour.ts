@@ -10,7 +10,21 @@ interface Spelling {
 
 const longestWritten = 80;
 const capitalThenSmall = /\p{Lu}\p{Ll}/u;
-const fillerWords = new Set(['with', 'and', 'a', 'an', 'the', 'stripe', 'striped', 'stripes', 'tracer', 'trace', 'line', 'wire', 'base']);
+const fillerWords = new Set([
+  'with',
+  'and',
+  'a',
+  'an',
+  'the',
+  'stripe',
+  'striped',
+  'stripes',
+  'tracer',
+  'trace',
+  'line',
+  'wire',
+  'base',
+]);
 
 /**
  * Reads a wire's colour as written in a cell: codes of the system apart (`Y/R`, `Y-R`, `Y\R`, `Y R`) or joined (`YR`,

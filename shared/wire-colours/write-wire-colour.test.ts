@@ -13,5 +13,7 @@ it("writes a wire as each system's diagrams do", () => {
 it("writes words where the system has no code, and a page's own code where it gives its key", () => {
   expect(wireColourCode({ base: 'turquoise', tracer: 'red' }, 'jis')).toBe('turquoise/red');
   expect(wireColourCode({ base: 'white', tracer: null }, 'own')).toBe('white');
-  expect(wireColourCode({ base: 'white', tracer: 'black' }, { name: 'own', key: { B: 'white', N: 'black' } })).toBe('B/N');
+  expect(wireColourCode({ base: 'white', tracer: 'black' }, { name: 'own', key: { B: 'white', N: 'black' } })).toBe(
+    'B/N',
+  );
 });

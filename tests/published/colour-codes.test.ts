@@ -147,7 +147,9 @@ describe('Japanese letters', () => {
   });
 
   it('has three codes that joined capitals also spell as two colours, and no more', () => {
-    const joined = japanese.flatMap(([a]) => japanese.map(([b]) => `${a}${b}`.toUpperCase())).filter((code) => code.length === 2);
+    const joined = japanese
+      .flatMap(([a]) => japanese.map(([b]) => `${a}${b}`.toUpperCase()))
+      .filter((code) => code.length === 2);
     const ambiguous = joined.filter((code) => readWireColour(code, { name: 'jis' }).kind === 'ambiguous');
     expect(ambiguous.toSorted()).toEqual(['BR', 'GR', 'LG']);
   });

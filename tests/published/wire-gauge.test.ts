@@ -43,12 +43,17 @@ function halfOfThirdFigure(printedValue: number): number {
 }
 
 describe('AWG 4 to 24 as printed', () => {
-  it.each(printed)('AWG %i: diameter, area and resistance', (gauge, millimetres, squareMillimetres, ohmsPerKilometre) => {
-    expect(difference(awgDiameterMillimetres(gauge), millimetres)).toBeLessThan(0.001);
-    expect(Math.abs(awgSquareMillimetres(gauge) - squareMillimetres)).toBeLessThanOrEqual(halfOfThirdFigure(squareMillimetres));
-    const ohms = copperResistance(quantity(1000), awgSquareMillimetres(gauge));
-    expect(difference(ohms, ohmsPerKilometre)).toBeLessThan(0.0005);
-  });
+  it.each(printed)(
+    'AWG %i: diameter, area and resistance',
+    (gauge, millimetres, squareMillimetres, ohmsPerKilometre) => {
+      expect(difference(awgDiameterMillimetres(gauge), millimetres)).toBeLessThan(0.001);
+      expect(Math.abs(awgSquareMillimetres(gauge) - squareMillimetres)).toBeLessThanOrEqual(
+        halfOfThirdFigure(squareMillimetres),
+      );
+      const ohms = copperResistance(quantity(1000), awgSquareMillimetres(gauge));
+      expect(difference(ohms, ohmsPerKilometre)).toBeLessThan(0.0005);
+    },
+  );
 
   it('reads a gauge in a cell as the table has it', () => {
     for (const [gauge, , squareMillimetres] of printed) {
