@@ -1,0 +1,59 @@
+import type { ReactElement } from 'react';
+import { Link } from 'react-router';
+import type { SubjectView } from '../../../shared/contracts/views.ts';
+import type { SubjectAddress } from '../../../shared/pages/address.ts';
+import { FaceThumbnail } from '../../blocks/face-thumbnail.tsx';
+import { counted } from '../../blocks/words.ts';
+import { paths } from '../../lib/paths.ts';
+
+type Connector = SubjectView['connectors'][number];
+
+interface ConnectorsByZoneProps {
+  readonly subject: SubjectAddress;
+  readonly connectors: readonly Connector[];
+  readonly pages: SubjectView['pages'];
+}
+
+/** Every connector as a small face, under the place on the bike where one looks for it. */
+export function ConnectorsByZone({ subject, connectors, pages }: ConnectorsByZoneProps): ReactElement {
+  const titles = new Map(pages.map(({ page, title }) => [page, title]));
+  return (
+    <>
+      {[...zonesOf(connectors)].map(([zone, inZone]) => (
+        <div className="zone" key={zone}>
+          <h3 className="zone-name">{zone}</h3>
+          <ul className="zone-connectors">
+            {inZone.map((connector) => (
+              <li key={`${connector.page}#${connector.id}`}>
+                <Link className="zone-connector" to={paths.line({ ...subject, page: connector.page }, connector.id)}>
+                  <FaceThumbnail connector={connector} />
+                  <span>
+                    <span className="zone-connector-name">{connector.name}</span>
+                    <span className="zone-connector-about">
+                      {counted(connector.cavities, 'cavity', 'cavities')}, on {titles.get(connector.page) ?? connector.page}
+                    </span>
+                  </span>
+                </Link>
+              </li>
+            ))}
+          </ul>
+        </div>
+      ))}
+    </>
+  );
+}
+
+/** The connectors zone by zone, in the order in which the pages name them; those without a zone last. */
+function zonesOf(connectors: readonly Connector[]): Map<string, Connector[]> {
+  const zones = new Map<string, Connector[]>();
+  const placed = connectors.filter(({ zone }) => zone !== null);
+  for (const connector of [...placed, ...connectors.filter(({ zone }) => zone === null)]) {
+    const name = nameOf(connector.zone);
+    zones.set(name, [...(zones.get(name) ?? []), connector]);
+  }
+  return zones;
+}
+
+function nameOf(zone: string | null): string {
+  return zone === null ? 'Nobody has said where' : zone.charAt(0).toUpperCase() + zone.slice(1);
+}
