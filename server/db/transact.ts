@@ -4,14 +4,16 @@ import type { Database } from './client.ts';
 /** Proof that a transaction is open: every method that writes asks for it, so nothing is written outside one. */
 export type Writing = Brand<{ readonly database: Database }, 'Writing'>;
 
-type Settled<Value> = Value extends PromiseLike<unknown> ? never : Value;
-
 /**
  * Runs `write` in one transaction that takes the write lock at once, and gives what it gives; if it throws, nothing
- * was written. It is synchronous, and an asynchronous `write` does not type-check: Drizzle's own types would accept
- * one, and commit before it had begun.
+ * was written. It is synchronous, and an asynchronous `write` asks for an argument that nobody can give: Drizzle's own
+ * types would accept one, and commit before it had begun.
  */
-export function transact<Value>(database: Database, write: (writing: Writing) => Settled<Value>): Settled<Value> {
+export function transact<Value>(
+  database: Database,
+  write: (writing: Writing) => Value,
+  ..._synchronous: Value extends PromiseLike<unknown> ? [never] : []
+): Value {
   // The one place that makes the proof.
   const writing = { database } as Writing;
   return database.sqlite.transaction(() => write(writing)).immediate();

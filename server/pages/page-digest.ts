@@ -1,4 +1,6 @@
 import type { Block, ConnectorBlock, Line } from '../../shared/blocks/block.ts';
+import { citedIds } from '../../shared/blocks/check-sources.ts';
+import { linesOf } from '../../shared/blocks/lines.ts';
 import type { PageText } from '../../shared/dialect/page-text.ts';
 import type { FaceLayout } from '../../shared/blocks/face-layout.ts';
 import type { Applicability } from '../../shared/pages/applicability.ts';
@@ -14,14 +16,9 @@ export interface CountedDigest {
   readonly digest: PageDigest;
 }
 
-/** The lines of a block; a caution and a sum have none. */
-export function linesOfBlock(block: Block): readonly Line[] {
-  return 'lines' in block ? block.lines : [];
-}
-
 /** True where a line, or its block, names a factory manual or a standard among its sources. */
 export function isCited(line: Line, sources: readonly Source[]): boolean {
-  const named = (line.cite ?? '').split(',').map((id) => id.trim());
+  const named = citedIds(line.cite);
   return sources.some(({ id, kind }) => named.includes(id) && (kind === 'factory-manual' || kind === 'standard'));
 }
 
@@ -52,7 +49,7 @@ function distinct(applicabilities: readonly Applicability[]): Applicability[] {
 
 /** Counts a page's lines, and digests it for lists and for the subject's other pages. */
 export function digestOf({ frontMatter, blocks }: PageText): CountedDigest {
-  const lines = blocks.flatMap(linesOfBlock);
+  const lines = blocks.flatMap((block) => [...linesOf(block)]);
   const connectors = blocks.filter((block) => block.kind === 'connector');
   return {
     lines: lines.length,

@@ -45,6 +45,8 @@ export interface PagePublication {
   standing(address: PageAddress): Standing;
   /** The text of the page's newest revision, or of another; null where there is none. */
   markdown(address: PageAddress, revision?: number): string | null;
+  /** What a moderator let through when a revision was published. */
+  overrides(revisionId: string): { code: string; address: string | null; reason: string }[];
   /** What a reader of a text at this address may know of the rest of its subject. */
   context(address: PageAddress): SubjectContext;
   /**
@@ -159,6 +161,7 @@ export function createPagePublication(database: Database, newId: NewId): PagePub
       const row = found && reader.revision(found.page.id, revision ?? found.page.publishedRevision);
       return row === null ? null : reader.requireBody(row.id);
     },
+    overrides: (revisionId) => reader.overrides(revisionId),
     context({ shelf, subject, page }) {
       const others = reader.digestsOfSubject(shelf, subject).filter((other) => other.page !== page);
       // A page of safe modifications lays its blocks over the donor's: there the same id is meant.

@@ -19,7 +19,7 @@ import { createParsingRation } from './parsing-ration.ts';
 /** After this time a text is given up and its worker ended. An honest page takes some tens of milliseconds. */
 const defaultDeadlineMilliseconds = 2000;
 /** Memory of one worker; a text that wants more is given up. */
-const workerMegabytes = 256;
+const defaultWorkerMegabytes = 256;
 const room = { each: 8, all: 64 } as const;
 
 export interface ParsePoolDependencies {
@@ -28,6 +28,7 @@ export interface ParsePoolDependencies {
   /** Milliseconds of a clock that never goes back, such as `performance.now`. */
   readonly now: () => number;
   readonly deadlineMilliseconds?: number;
+  readonly workerMegabytes?: number;
   /** The worker's file; the book's own where it is absent. */
   readonly workerEntry?: URL;
 }
@@ -60,10 +61,20 @@ function bookWorkerEntry(): URL {
   return places.find((place) => existsSync(fileURLToPath(place))) ?? new URL('./parse-worker.js', import.meta.url);
 }
 
-function startWorker(entry: URL): Worker {
-  const typeScript = entry.pathname.endsWith('.ts');
-  const execArgv = typeScript ? ['--import', pathToFileURL(createRequire(import.meta.url).resolve('tsx')).href] : [];
-  return new Worker(entry, { execArgv, resourceLimits: { maxOldGenerationSizeMb: workerMegabytes } });
+/**
+ * What makes a worker read TypeScript: tsx registers itself in it. Its own `--import tsx` does nothing in a worker, where
+ * it takes the main thread's registration for granted.
+ */
+function typeScriptArguments(): string[] {
+  // `resolve` finds the CommonJS twin, which cannot register from here; the module stands beside it.
+  const tsx = new URL('index.mjs', pathToFileURL(createRequire(import.meta.url).resolve('tsx/esm/api')));
+  const register = `import { register } from ${JSON.stringify(tsx.href)}; register();`;
+  return ['--import', `data:text/javascript,${encodeURIComponent(register)}`];
+}
+
+function startWorker(entry: URL, megabytes: number): Worker {
+  const execArgv = entry.pathname.endsWith('.ts') ? typeScriptArguments() : [];
+  return new Worker(entry, { execArgv, resourceLimits: { maxOldGenerationSizeMb: megabytes } });
 }
 
 /**
@@ -95,7 +106,7 @@ export function createParsePool(dependencies: ParsePoolDependencies): ParsePool 
   }
 
   function open(): Worker {
-    const worker = startWorker(entry);
+    const worker = startWorker(entry, dependencies.workerMegabytes ?? defaultWorkerMegabytes);
     worker.on('message', (message: FromParseWorker) => {
       const current = running.get(worker);
       if (current === undefined) return;
