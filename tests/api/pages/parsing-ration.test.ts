@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { createParsingRation, networkOf } from './parsing-ration.ts';
+import { createParsingRation, networkOf } from '../../../server/pages/parsing-ration.ts';
 
 describe('the ration of parsing time', () => {
   it('lets an asker use twenty seconds in any minute, and says how long to wait', () => {

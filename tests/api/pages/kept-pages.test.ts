@@ -1,6 +1,6 @@
 import { brotliDecompressSync, gunzipSync } from 'node:zlib';
 import { describe, expect, it } from 'vitest';
-import { createKeptPages } from './kept-pages.ts';
+import { createKeptPages } from '../../../server/pages/kept-pages.ts';
 
 const html = `<p>${'Take the earthed lead off first. '.repeat(50)}</p>`;
 const megabyte = 1024 * 1024;

@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { createParseQueue } from './parse-queue.ts';
+import { createParseQueue } from '../../../server/pages/parse-queue.ts';
 
 function takeAll(queue: ReturnType<typeof createParseQueue<string>>): string[] {
   const taken: string[] = [];
