@@ -26,8 +26,20 @@ function cavitiesOf(layout: FaceLayout): number {
   return layout.kind === 'ring' ? layout.cavities : layout.rows.flat().filter((isCavity) => isCavity).length;
 }
 
+/** A layout as a block may write it: `xx.xx+xxxxx`, `round 6`. */
+function writtenLayout(layout: FaceLayout): string {
+  if (layout.kind === 'ring') return `round ${String(layout.cavities)}`;
+  return layout.rows.map((row) => row.map((isCavity) => (isCavity ? 'x' : '.')).join('')).join('+');
+}
+
 function connectorEntry(block: ConnectorBlock): ConnectorEntry {
-  return { id: block.id, name: block.name ?? block.id, zone: block.zone, cavities: cavitiesOf(block.layout) };
+  return {
+    id: block.id,
+    name: block.name ?? block.id,
+    zone: block.zone,
+    cavities: cavitiesOf(block.layout),
+    layout: writtenLayout(block.layout),
+  };
 }
 
 /** The ids that a block gives; `inside` names a component that stands elsewhere, and gives none. */

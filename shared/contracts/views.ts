@@ -199,7 +199,15 @@ export const subjectViewSchema = z.object({
   pages: z.array(pageSummarySchema),
   /** Every connector of the subject, for the sheet that lists faces by zone. */
   connectors: z.array(
-    z.object({ page: z.string(), id: z.string(), name: z.string(), zone: z.string().nullable(), cavities: z.number().int() }),
+    z.object({
+      page: z.string(),
+      id: z.string(),
+      name: z.string(),
+      zone: z.string().nullable(),
+      cavities: z.number().int(),
+      /** The face's shape as a block writes it, for a thumbnail: `xx.xx+xxxxx`, `round 6`. */
+      layout: z.string().optional(),
+    }),
   ),
 });
 export type SubjectView = z.infer<typeof subjectViewSchema>;

@@ -9,6 +9,8 @@ export interface ConnectorEntry {
   readonly name: string;
   readonly zone: string | null;
   readonly cavities: number;
+  /** The face's shape as a block writes it: `xx.xx+xxxxx`, `round 6`. */
+  readonly layout: string;
 }
 
 /** What lists and neighbours need to know of a page, without its text. */
