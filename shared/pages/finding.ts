@@ -13,6 +13,7 @@ export const pageFindingSeverities = {
   'expect-unreadable': 'warn',
   'caution-missing': 'warn',
   uncited: 'hint',
+  'html-left-out': 'hint',
 } as const satisfies Record<string, Severity>;
 
 /** The code of a finding. */
