@@ -1,0 +1,88 @@
+import { anyVariant, type Variant } from '../pages/applicability.ts';
+import type { LineFound } from './best-lines.ts';
+import type { LinesIndex } from './lines-index.ts';
+import type { QueryTerm, ReadQuery } from './read-query.ts';
+import { createScan, type LinesQueryOptions } from './scan-lines.ts';
+import { maskTerms, type TermMasks } from './term-masks.ts';
+
+/** What a query found among the lines. */
+export interface LinesAnswer {
+  readonly lines: readonly LineFound[];
+  /** How many lines answer in all. */
+  readonly count: number;
+  /** True where a colour, a cavity, a size or a circuit is named, so that lines are what is asked for. */
+  readonly namesLine: boolean;
+  /** True where no line has all of it, and these have only some of its words. */
+  readonly someWordsOnly: boolean;
+  /** The words and codes that nothing in the book has. */
+  readonly unanswered: readonly QueryTerm[];
+  readonly mended: TermMasks['mended'];
+  /** Blocks that the words alone lead to, where the colour or cavity that is asked for is not there. */
+  readonly elsewhere: readonly number[];
+  /** The bike that was meant: what was chosen, and a year or market that the query names. */
+  readonly variant: Variant;
+}
+
+/** Terms that name something exactly: no line that lacks one is ever shown in its place. */
+function isCode({ kind }: QueryTerm): boolean {
+  return kind === 'colour' || kind === 'cavity' || kind === 'size' || kind === 'no-colour' || kind === 'number';
+}
+
+/** A word that is a code for all one can tell, such as `YQ`: at most two letters, or three that cannot be said. */
+function isShort(term: QueryTerm): boolean {
+  return term.kind === 'word' && term.single !== null && !term.last && /^(?:[a-z]{1,2}|[^aeiou][^aeiouy]{2})$/.test(term.single);
+}
+
+/**
+ * Finds the lines that answer a query, best first. A colour, cavity, size or number must be there exactly; words that
+ * nothing in the book has are left out and said; only a query of nothing but words may find lines that have some of them.
+ */
+export function queryLines(index: LinesIndex, query: ReadQuery, options: Partial<LinesQueryOptions> = {}): LinesAnswer {
+  const { bench = null, limit = 15 } = options;
+  const { terms } = query;
+  const masks = maskTerms(index, terms);
+  const market = marketAmong(index, terms, masks.unanswered);
+  const variant = variantOf(query, market?.market ?? null, options.variant ?? anyVariant);
+  const unanswered = terms.filter((_, number) => masks.unanswered.has(number) && number !== market?.number);
+  const barred = unanswered.some((term) => isCode(term) || isShort(term));
+  const required = bitsOf(terms, (term, number) => isCode(term) || !masks.unanswered.has(number));
+  const scan = createScan(index, terms, masks, { bench, variant, limit });
+  const nothing = {
+    lines: [], count: 0, namesLine: false, someWordsOnly: false, unanswered, mended: masks.mended, elsewhere: [], variant,
+  };
+  if (required === 0 || scan.namesOnlySubject(required)) return nothing;
+  const hasCode = terms.some(isCode);
+  const all = barred ? { lines: [], count: 0, inLine: false } : scan.run(required, required);
+  if (all.count > 0) return { ...nothing, ...all, namesLine: hasCode || all.inLine };
+  if (hasCode) {
+    const words = bitsOf(terms, (term, number) => !isCode(term) && !masks.unanswered.has(number));
+    return { ...nothing, namesLine: true, elsewhere: scan.holdersNamed(words) };
+  }
+  if (barred) return nothing;
+  const some = scan.run(required, 0);
+  return { ...nothing, ...some, namesLine: false, someWordsOnly: some.count > 0 };
+}
+
+function bitsOf(terms: readonly QueryTerm[], counts: (term: QueryTerm, number: number) => boolean): number {
+  return terms.reduce((bits, term, number) => (counts(term, number) ? bits | (1 << number) : bits), 0);
+}
+
+/** A market that the query names and that nothing else in the book is called. */
+function marketAmong(
+  { applicabilities }: LinesIndex,
+  terms: readonly QueryTerm[],
+  unanswered: ReadonlySet<number>,
+): { number: number; market: string } | null {
+  for (const number of unanswered) {
+    const term = terms[number];
+    if (term?.kind !== 'word' || term.single === null) continue;
+    const market = applicabilities.flatMap(({ markets }) => markets).find((name) => name.toLowerCase() === term.single);
+    if (market !== undefined) return { number, market };
+  }
+  return null;
+}
+
+/** The bike that is meant: what the query names goes before what was chosen. */
+function variantOf(query: ReadQuery, market: string | null, chosen: Variant): Variant {
+  return { ...chosen, year: query.year?.year ?? chosen.year, market: market ?? chosen.market };
+}
