@@ -27,6 +27,7 @@ export interface MemberService {
   signIn(credentials: Credentials, networkAddress: string): Answer<Member>;
   /** Changes one's own password, and ends every session of the member, the asking one too. */
   changePassword(actor: Actor, body: unknown, networkAddress: string): Answer<Member>;
+  hasMember(email: string): boolean;
   /** Takes somebody into the club. Not guarded: for the seed and the administrator's command. */
   addMember(body: unknown): Answer<Member>;
 }
@@ -87,6 +88,8 @@ export function createMemberService({ database, now, newId }: MemberServiceParts
       const member = store.getById(id);
       return member === null || member.suspended ? null : member;
     },
+
+    hasMember: (email) => store.getByEmail(foldEmail(email)) !== null,
 
     async signIn(credentials, networkAddress) {
       const email = foldEmail(credentials.email);
