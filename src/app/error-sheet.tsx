@@ -21,46 +21,55 @@ export function ErrorSheet(): ReactElement {
 }
 
 function WhatToDo({ code, here }: { readonly code: Problem['code']; readonly here: string }): ReactElement {
-  switch (code) {
-    case 'sign-in-needed':
-      return (
-        <p className="button-row">
-          <ButtonLink look="primary" to={paths.signInAndReturn(here)}>
-            Sign in and go on here
-          </ButtonLink>
-        </p>
-      );
-    case 'not-found':
-      return (
-        <>
+  if (code === 'sign-in-needed') {
+    return (
+      <p className="button-row">
+        <ButtonLink look="primary" to={paths.signInAndReturn(here)}>
+          Sign in and go on here
+        </ButtonLink>
+      </p>
+    );
+  }
+  if (code === 'not-found') {
+    return (
+      <>
+        <div className="error-search">
           <SearchSlot />
-          <p className="button-row error-places">
-            <ButtonLink to={paths.shelf('donors')}>Look along the donors</ButtonLink>
-            <ButtonLink to={paths.home}>Go to the first page</ButtonLink>
-          </p>
-        </>
-      );
-    default:
-      return (
-        <p className="button-row">
-          {/* Asked of the server anew: whatever went wrong here may be in what this browser holds. */}
-          <ButtonLink look="primary" to={here} reloadDocument>
-            Try again
-          </ButtonLink>
+        </div>
+        <p className="button-row error-places">
+          <ButtonLink to={paths.shelf('donors')}>Look along the donors</ButtonLink>
           <ButtonLink to={paths.home}>Go to the first page</ButtonLink>
         </p>
-      );
+      </>
+    );
   }
+  return (
+    <p className="button-row">
+      {/* Asked of the server anew: whatever went wrong here may be in what this browser holds. */}
+      <ButtonLink look="primary" to={here} reloadDocument>
+        Try again
+      </ButtonLink>
+      <ButtonLink to={paths.home}>Go to the first page</ButtonLink>
+    </p>
+  );
 }
 
 function refusalOf(error: unknown): Problem {
   const refusal = problemThrown(error);
   if (refusal !== null) return refusal;
   if (isRouteErrorResponse(error) && error.status === 404) {
-    return problem('not-found', 'There is no sheet at this address', 'Search for what you were after, or start at a shelf.');
+    return problem(
+      'not-found',
+      'There is no sheet at this address',
+      'Search for what you were after, or start at a shelf.',
+    );
   }
   if (isRouteErrorResponse(error) && error.status === 405) {
-    return problem('method-not-allowed', 'Nothing can be sent to this address', 'Nothing was changed. Go back and use the form again.');
+    return problem(
+      'method-not-allowed',
+      'Nothing can be sent to this address',
+      'Nothing was changed. Go back and use the form again.',
+    );
   }
   return problem(
     'unexpected',

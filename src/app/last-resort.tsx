@@ -10,7 +10,8 @@ export function LastResort(): ReactElement {
         <div className="sheet-title">
           <h1>This sheet could not be drawn</h1>
           <p className="sheet-lead">
-            The fault is ours and has been written down. The book itself is as it was, and so is whatever you had sent before.
+            The fault is ours and has been written down. The book itself is as it was, and so is whatever you had sent
+            before.
           </p>
         </div>
         <p className="button-row">

@@ -4,7 +4,10 @@ import { matchRoutes, type RouteObject } from 'react-router';
  * Loads the lazy routes that match an address and puts what they give in their place. Before hydration, or the router
  * would first draw nothing where the server has drawn a sheet.
  */
-export async function loadMatchingRoutes(routes: RouteObject[], location: { pathname: string; search: string }): Promise<void> {
+export async function loadMatchingRoutes(
+  routes: RouteObject[],
+  location: { pathname: string; search: string },
+): Promise<void> {
   const matches = matchRoutes(routes, location) ?? [];
   await Promise.all(
     matches.map(async ({ route }) => {

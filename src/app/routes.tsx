@@ -29,7 +29,7 @@ export const routes: RouteObject[] = [
         id: 'sheet',
         ErrorBoundary: ErrorSheet,
         children: [
-          { index: true, id: 'home', loader: homeLoader, Component: HomePage },
+          { index: true, id: 'home', handle: kept, loader: homeLoader, Component: HomePage },
           ...memberRoutes,
           ...proposalRoutes,
           { path: 'face', id: 'face', loader: nothing, action: faceAction },
@@ -84,6 +84,5 @@ export const routes: RouteObject[] = [
 /** No sheet stands at this address. */
 function nothing(): never {
   // The router's own kind of throw, which carries the status.
-  // eslint-disable-next-line @typescript-eslint/only-throw-error
   throw nothingHere();
 }

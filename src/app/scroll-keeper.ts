@@ -1,5 +1,5 @@
 import { useEffect, useLayoutEffect, useRef } from 'react';
-import { NavigationType, useLocation, useNavigationType } from 'react-router';
+import { NavigationType, useLocation, useNavigationType, type Location } from 'react-router';
 import { keepsPlace } from '../lib/keep-place.ts';
 
 const storageKey = 'earthstrap-places';
@@ -13,7 +13,7 @@ export function useScrollKeeper(): void {
   const location = useLocation();
   const type = useNavigationType();
   const places = useRef<Places | null>(null);
-  const entry = useRef(location.key);
+  const entry = useRef(entryOf(location));
   const first = useRef(true);
 
   useEffect(() => {
@@ -36,16 +36,21 @@ export function useScrollKeeper(): void {
   }, []);
 
   useLayoutEffect(() => {
-    entry.current = location.key;
+    entry.current = entryOf(location);
     if (first.current) {
       // The browser has placed the first sheet itself.
       first.current = false;
       return;
     }
-    const place = places.current?.[location.key];
+    const place = places.current?.[entryOf(location)];
     if (type === NavigationType.Pop && place !== undefined) window.scrollTo(0, place);
     else if (!keepsPlace(location.state)) scrollTo(location.hash);
   }, [location, type]);
+}
+
+/** Names an entry of the history; those that the router did not make itself, as a plain link's, have no key of their own. */
+function entryOf({ key, pathname, hash }: Location): string {
+  return key === 'default' ? pathname + hash : key;
 }
 
 function scrollTo(hash: string): void {
@@ -66,7 +71,9 @@ function readPlaces(): Places {
   try {
     const kept: unknown = JSON.parse(sessionStorage.getItem(storageKey) ?? '{}');
     if (typeof kept !== 'object' || kept === null) return {};
-    return Object.fromEntries(Object.entries(kept).filter((pair): pair is [string, number] => typeof pair[1] === 'number'));
+    return Object.fromEntries(
+      Object.entries(kept).filter((pair): pair is [string, number] => typeof pair[1] === 'number'),
+    );
   } catch {
     return {};
   }

@@ -28,7 +28,8 @@ function nearChanges(lines: readonly LineChange[], around: number): boolean[] {
   const near = lines.map(() => false);
   lines.forEach(({ kind }, index) => {
     if (kind === 'same') return;
-    for (let at = Math.max(0, index - around); at <= Math.min(lines.length - 1, index + around); at += 1) near[at] = true;
+    for (let at = Math.max(0, index - around); at <= Math.min(lines.length - 1, index + around); at += 1)
+      near[at] = true;
   });
   return near;
 }

@@ -1,7 +1,14 @@
 import type { ReactElement } from 'react';
 import type { DifferenceView } from '../../shared/contracts/views.ts';
 import { classNames } from '../ui/class-names.ts';
-import { cellsOf, isTableRule, stretchesOf, type LineChange, type Stretch, type WordChange } from './difference-stretches.ts';
+import {
+  cellsOf,
+  isTableRule,
+  stretchesOf,
+  type LineChange,
+  type Stretch,
+  type WordChange,
+} from './difference-stretches.ts';
 import { counted } from './words.ts';
 
 /** How many unchanged lines stay in sight on each side of a change. */
@@ -47,7 +54,10 @@ function StretchOf({ stretch }: { readonly stretch: Stretch }): ReactElement {
             {stretch.lines
               .filter((line) => !isTableRule(line))
               .map((line, index) => (
-                <tr key={`${keyOf(line)}-${String(index)}`} className={classNames('difference-row', `difference-${line.kind}`)}>
+                <tr
+                  key={`${keyOf(line)}-${String(index)}`}
+                  className={classNames('difference-row', `difference-${line.kind}`)}
+                >
                   <LineNumber line={line} />
                   {cellsOf(line.words).map((words, cell) => (
                     // A cell has nothing of its own but its place.

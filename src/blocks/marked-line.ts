@@ -50,7 +50,9 @@ function cavitiesOf(line: Element): Element[] {
   const name = line.getAttribute('data-cavity');
   const connector = line.closest('[data-connector]');
   if (name === null || connector === null) return [];
-  return [...connector.querySelectorAll('.face [data-cavity]')].filter((cavity) => cavity.getAttribute('data-cavity') === name);
+  return [...connector.querySelectorAll('.face [data-cavity]')].filter(
+    (cavity) => cavity.getAttribute('data-cavity') === name,
+  );
 }
 
 /** Brings a row into sight by as little as it takes, so that the face it was chosen on stays where it is. */

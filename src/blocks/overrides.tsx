@@ -16,7 +16,8 @@ export function Overrides({ overrides }: { readonly overrides: readonly Override
               'Published although the book objects'
             ) : (
               <>
-                Published although the book objects to <a href={override.address}>{override.address.replace(/^#/, '')}</a>
+                Published although the book objects to{' '}
+                <a href={override.address}>{override.address.replace(/^#/, '')}</a>
               </>
             )
           }

@@ -16,7 +16,12 @@ interface PageLedgerProps {
 }
 
 /** Pages as rows of a day book. */
-export function PageLedger({ pages, caption, withSubject = false, variant = anyVariant }: PageLedgerProps): ReactElement {
+export function PageLedger({
+  pages,
+  caption,
+  withSubject = false,
+  variant = anyVariant,
+}: PageLedgerProps): ReactElement {
   return (
     <table className="ledger">
       <caption className="heard">{caption}</caption>
@@ -33,7 +38,7 @@ export function PageLedger({ pages, caption, withSubject = false, variant = anyV
           <tr key={`${page.shelf}/${page.subject}/${page.page}`}>
             <th scope="row">
               <Link className="ledger-name" to={paths.page(page, variant)}>
-                {withSubject ? `${page.subjectTitle}: ${page.title}` : page.title}
+                {withSubject ? titleWithSubject(page) : page.title}
               </Link>
               {page.summary === '' ? null : <p className="ledger-summary">{page.summary}</p>}
             </th>
@@ -49,6 +54,11 @@ export function PageLedger({ pages, caption, withSubject = false, variant = anyV
       </tbody>
     </table>
   );
+}
+
+/** An overview has its subject's name already. */
+function titleWithSubject({ title, subjectTitle, kind }: PageSummary): string {
+  return kind === 'overview' ? title : `${subjectTitle}: ${title}`;
 }
 
 function contentsOf({ lines, connectors }: PageSummary): string {

@@ -47,7 +47,15 @@ function useInnerLinks(element: Held): void {
     if (element.current === null) return;
     const root: HTMLElement = element.current;
     function follow(event: MouseEvent): void {
-      if (event.defaultPrevented || event.button !== 0 || event.metaKey || event.ctrlKey || event.shiftKey || event.altKey) return;
+      if (
+        event.defaultPrevented ||
+        event.button !== 0 ||
+        event.metaKey ||
+        event.ctrlKey ||
+        event.shiftKey ||
+        event.altKey
+      )
+        return;
       if (!(event.target instanceof Element)) return;
       const link = event.target.closest('a');
       if (link === null) {

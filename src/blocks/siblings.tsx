@@ -26,7 +26,7 @@ export function Siblings({ address, subjectTitle, siblings, variant }: SiblingsP
         {others.map(({ page, title, kind }) => (
           <li key={page}>
             <Link to={paths.page({ ...address, page }, variant)}>
-              <span className="soft">{pageKindLabels[kind]}</span> {title}
+              <span className="siblings-kind">{pageKindLabels[kind]}</span> <span>{title}</span>
             </Link>
           </li>
         ))}

@@ -7,7 +7,6 @@ export async function requireAnswer<Value>(answer: Promise<Result<Value, Problem
   const result = await answer;
   if (result.ok) return result.value;
   // The router's own kind of throw: it carries the status, and the error sheet reads the problem from it.
-  // eslint-disable-next-line @typescript-eslint/only-throw-error
   throw data(result.refusal, { status: result.refusal.status });
 }
 

@@ -1,4 +1,10 @@
-import { formatPageAddress, pagePath, type PageAddress, type Shelf, type SubjectAddress } from '../../shared/pages/address.ts';
+import {
+  formatPageAddress,
+  pagePath,
+  type PageAddress,
+  type Shelf,
+  type SubjectAddress,
+} from '../../shared/pages/address.ts';
 import { anyVariant, type Variant } from '../../shared/pages/applicability.ts';
 import { variantQuery } from './bench.ts';
 
@@ -14,6 +20,9 @@ export const paths = {
 
   signInAndReturn: (next: string): string => `/sign-in?next=${encodeURIComponent(next)}`,
   proposal: (id: string): string => `/proposals/${encodeURIComponent(id)}`,
+  /** Where an author goes on writing; from the text that was published meanwhile, where their proposal has fallen behind. */
+  revise: (id: string, from?: 'published'): string =>
+    `/proposals/${encodeURIComponent(id)}/revise${from === undefined ? '' : `?from=${from}`}`,
   search: (query?: string): string => (query === undefined ? '/search' : `/search?q=${encodeURIComponent(query)}`),
 
   shelf: (shelf: Shelf): string => `/${shelf}`,
@@ -28,7 +37,8 @@ export const paths = {
   propose: (address: PageAddress, revision?: number): string =>
     `/${formatPageAddress(address)}/propose${revision === undefined ? '' : `?revision=${String(revision)}`}`,
   revisions: (address: PageAddress): string => `/${formatPageAddress(address)}/revisions`,
-  revision: (address: PageAddress, number: number): string => `/${formatPageAddress(address)}/revisions/${String(number)}`,
+  revision: (address: PageAddress, number: number): string =>
+    `/${formatPageAddress(address)}/revisions/${String(number)}`,
   /** Where two revisions are chosen for: the form adds which. */
   compareTwo: (address: PageAddress): string => `/${formatPageAddress(address)}/compare`,
   compare: (address: PageAddress, from: number, to: number): string =>

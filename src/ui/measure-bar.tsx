@@ -13,7 +13,16 @@ export function MeasureBar({ value, of, words }: MeasureBarProps): ReactElement 
   return (
     <span className="measure-bar">
       <svg viewBox="0 0 100 10" preserveAspectRatio="none" aria-hidden="true" focusable="false">
-        <rect x="0" y="0" width="100" height="10" fill="none" stroke="currentColor" strokeWidth="1" vectorEffect="non-scaling-stroke" />
+        <rect
+          x="0"
+          y="0"
+          width="100"
+          height="10"
+          fill="none"
+          stroke="currentColor"
+          strokeWidth="1"
+          vectorEffect="non-scaling-stroke"
+        />
         <rect x="0" y="0" width={share * 100} height="10" fill="currentColor" />
       </svg>
       <span>{words}</span>

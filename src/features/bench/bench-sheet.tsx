@@ -21,7 +21,10 @@ export function BenchSheet(): ReactElement {
 function EmptyBench(): ReactElement {
   const { donors } = useAnswer(homeQuery(useApi()));
   return (
-    <Sheet title="The bench is empty" lead="Say which donor stands in front of you. It is kept in this browser and nowhere else.">
+    <Sheet
+      title="The bench is empty"
+      lead="Say which donor stands in front of you. It is kept in this browser and nowhere else."
+    >
       <PageHead title="My bike · Earthstrap" listed={false} />
       {donors.length === 0 ? (
         <EmptyPlace>
@@ -47,7 +50,11 @@ function DonorOnBench({ donor, bench }: { readonly donor: string; readonly bench
   return (
     <Sheet
       title={summary.title}
-      lead={words === null ? 'On the bench; say which one, and what does not hold for it is set back.' : `On the bench: ${words}`}
+      lead={
+        words === null
+          ? 'On the bench; say which one, and what does not hold for it is set back.'
+          : `On the bench: ${words}`
+      }
       beside={<VariantChooser subject={subject} variant={bench.variant} choices={choices} path={paths.bench} />}
     >
       <PageHead title={`My bike: ${summary.title} · Earthstrap`} listed={false} />

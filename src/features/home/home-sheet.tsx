@@ -31,8 +31,8 @@ export function HomeSheet({ searchField }: { readonly searchField: ReactNode }):
         {view.lately.length === 0 ? (
           <EmptyPlace>
             <p>
-              Nothing has been issued yet. The first page of a bike is its overview: what it is, and how its electrics are
-              laid out.
+              Nothing has been issued yet. The first page of a bike is its overview: what it is, and how its electrics
+              are laid out.
             </p>
             <ButtonLink look="primary" to={paths.newSubject('donors')}>
               Write the first donor
@@ -48,7 +48,8 @@ export function HomeSheet({ searchField }: { readonly searchField: ReactNode }):
             <li key={shelf}>
               <Link to={paths.shelf(shelf)}>{shelfLabels[shelf]}</Link>{' '}
               <span className="soft">
-                {counted(subjects, shelfNouns[shelf])}, {counted(lines, 'line')}
+                {counted(subjects, shelfNouns[shelf])}
+                {lines === 0 ? '' : `, ${counted(lines, 'line')}`}
               </span>
             </li>
           ))}

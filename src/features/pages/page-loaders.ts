@@ -1,6 +1,6 @@
 import { redirect, type LoaderFunctionArgs } from 'react-router';
 import { benchContext } from '../../lib/api-context.ts';
-import { variantFor, variantQuery } from '../../lib/bench.ts';
+import { variantFor } from '../../lib/bench.ts';
 import { apiOf, prime, requirePage, requireRevision } from '../../lib/loading.ts';
 import { paths } from '../../lib/paths.ts';
 import { compareQuery, pageQuery, revisionQuery, revisionsQuery } from '../../lib/queries.ts';
@@ -13,7 +13,7 @@ export async function pageLoader({ context, params, request }: LoaderFunctionArg
   if (address.page === 'overview') return redirect(paths.subject(address) + search, 301);
   const variant = variantFor(address, searchParams, context.get(benchContext));
   await prime(context, pageQuery(apiOf(context), address, variant));
-  return { address, variant, shownFor: variantQuery(variant) };
+  return { address, variant };
 }
 
 /** Every revision of a page. */
@@ -29,7 +29,7 @@ export async function revisionLoader({ context, params, request }: LoaderFunctio
   const number = requireRevision(params['number']);
   const variant = variantFor(address, new URL(request.url).searchParams, context.get(benchContext));
   await prime(context, revisionQuery(apiOf(context), address, number, variant));
-  return { address, number, variant, shownFor: variantQuery(variant) };
+  return { address, number, variant };
 }
 
 /** What changed from one revision to another; without both, the last change. */

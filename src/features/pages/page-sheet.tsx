@@ -29,7 +29,12 @@ export function PageSheet(): ReactElement {
       sections={sectionsOf(view.outline)}
       foot={<TitleBlock address={address} view={view} />}
     >
-      <PageHead title={pageTitle(view)} description={view.summary} canonical={pagePath(address)} listed={!view.retired} />
+      <PageHead
+        title={pageTitle(view)}
+        description={view.summary}
+        canonical={pagePath(address)}
+        listed={!view.retired}
+      />
       <Overrides overrides={view.overrides} />
       <RenderedPage of={view.address} html={view.html} />
       <Siblings address={address} siblings={view.siblings} subjectTitle={view.subjectTitle} variant={variant} />

@@ -33,10 +33,13 @@ export function RevisionSheet(): ReactElement {
         listed={false}
       />
       {old ? (
-        <Notice look="warn" title={`This is revision ${String(number)} of ${String(view.newestRevision)}: do not wire by it`}>
+        <Notice
+          look="warn"
+          title={`This is revision ${String(number)} of ${String(view.newestRevision)}: do not wire by it`}
+        >
           <p>
-            It was issued on {dayOf(view.publishedAt)} and has been replaced since. Something in it was put right, or the bike
-            was measured again.
+            It was issued on {dayOf(view.publishedAt)} and has been replaced since. Something in it was put right, or
+            the bike was measured again.
           </p>
           <p className="button-row unprinted">
             <ButtonLink look="primary" to={paths.page(address)}>

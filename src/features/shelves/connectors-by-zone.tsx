@@ -5,6 +5,7 @@ import type { SubjectAddress } from '../../../shared/pages/address.ts';
 import { FaceThumbnail } from '../../blocks/face-thumbnail.tsx';
 import { counted } from '../../blocks/words.ts';
 import { paths } from '../../lib/paths.ts';
+import { BikeZones, zoneAnchor } from './bike-zones.tsx';
 
 type Connector = SubjectView['connectors'][number];
 
@@ -17,43 +18,51 @@ interface ConnectorsByZoneProps {
 /** Every connector as a small face, under the place on the bike where one looks for it. */
 export function ConnectorsByZone({ subject, connectors, pages }: ConnectorsByZoneProps): ReactElement {
   const titles = new Map(pages.map(({ page, title }) => [page, title]));
+  const zones = [...zonesOf(connectors)];
   return (
-    <>
-      {[...zonesOf(connectors)].map(([zone, inZone]) => (
-        <div className="zone" key={zone}>
-          <h3 className="zone-name">{zone}</h3>
-          <ul className="zone-connectors">
-            {inZone.map((connector) => (
-              <li key={`${connector.page}#${connector.id}`}>
-                <Link className="zone-connector" to={paths.line({ ...subject, page: connector.page }, connector.id)}>
-                  <FaceThumbnail connector={connector} />
-                  <span>
-                    <span className="zone-connector-name">{connector.name}</span>
-                    <span className="zone-connector-about">
-                      {counted(connector.cavities, 'cavity', 'cavities')}, on {titles.get(connector.page) ?? connector.page}
+    <div className="zones">
+      {subject.shelf === 'donors' ? (
+        <BikeZones zones={zones.map(([zone, inZone]) => ({ zone, connectors: inZone.length }))} />
+      ) : null}
+      <div>
+        {zones.map(([zone, inZone]) => (
+          <div className="zone" key={zone}>
+            <h3 className="zone-name" id={zoneAnchor(zone)}>
+              {zone}
+            </h3>
+            <ul className="zone-connectors">
+              {inZone.map((connector) => (
+                <li key={`${connector.page}#${connector.id}`}>
+                  <Link className="zone-connector" to={paths.line({ ...subject, page: connector.page }, connector.id)}>
+                    <FaceThumbnail connector={connector} />
+                    <span>
+                      <span className="zone-connector-name">{connector.name}</span>
+                      <span className="zone-connector-about">
+                        {counted(connector.cavities, 'cavity', 'cavities')}, on{' '}
+                        {titles.get(connector.page) ?? connector.page}
+                      </span>
                     </span>
-                  </span>
-                </Link>
-              </li>
-            ))}
-          </ul>
-        </div>
-      ))}
-    </>
+                  </Link>
+                </li>
+              ))}
+            </ul>
+          </div>
+        ))}
+      </div>
+    </div>
   );
 }
+
+/** For connectors whose page does not say where on the bike they are. */
+const unplaced = 'nobody has said where';
 
 /** The connectors zone by zone, in the order in which the pages name them; those without a zone last. */
 function zonesOf(connectors: readonly Connector[]): Map<string, Connector[]> {
   const zones = new Map<string, Connector[]>();
   const placed = connectors.filter(({ zone }) => zone !== null);
   for (const connector of [...placed, ...connectors.filter(({ zone }) => zone === null)]) {
-    const name = nameOf(connector.zone);
+    const name = connector.zone ?? unplaced;
     zones.set(name, [...(zones.get(name) ?? []), connector]);
   }
   return zones;
-}
-
-function nameOf(zone: string | null): string {
-  return zone === null ? 'Nobody has said where' : zone.charAt(0).toUpperCase() + zone.slice(1);
 }

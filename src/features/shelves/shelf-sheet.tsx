@@ -16,12 +16,14 @@ import type { shelfLoader } from './shelf-loader.ts';
 const shelfTexts: Readonly<Record<Shelf, { lead: string; empty: string; add: string }>> = {
   donors: {
     lead: 'The motorcycles that members strip and rebuild, each with its connectors, its known faults and what may safely be changed.',
-    empty: 'No donor stands here yet. The first page of one is its overview: maker and model, years, how it charges and how it sparks.',
+    empty:
+      'No donor stands here yet. The first page of one is its overview: maker and model, years, how it charges and how it sparks.',
     add: 'Add a donor',
   },
   parts: {
     lead: 'What is fitted instead of the original: control units, regulators, lamps, switches.',
-    empty: 'No part stands here yet. Begin with the unit on your own bench: its connector, what each terminal wants, and what it replaces.',
+    empty:
+      'No part stands here yet. Begin with the unit on your own bench: its connector, what each terminal wants, and what it replaces.',
     add: 'Add a part',
   },
   reference: {
@@ -110,7 +112,13 @@ function SubjectLedger({ shelf, subjects }: SubjectLedgerProps): ReactElement {
   );
 }
 
-function Documented({ subject, mostLines }: { readonly subject: SubjectSummary; readonly mostLines: number }): ReactElement {
+function Documented({
+  subject,
+  mostLines,
+}: {
+  readonly subject: SubjectSummary;
+  readonly mostLines: number;
+}): ReactElement {
   if (subject.lines === 0) return <span>{counted(subject.pages, 'page')}</span>;
   return (
     <>

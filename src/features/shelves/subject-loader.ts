@@ -1,6 +1,6 @@
 import type { LoaderFunctionArgs } from 'react-router';
 import { benchContext } from '../../lib/api-context.ts';
-import { variantFor, variantQuery } from '../../lib/bench.ts';
+import { variantFor } from '../../lib/bench.ts';
 import { apiOf, prime, requireSubject } from '../../lib/loading.ts';
 import { pageQuery, subjectQuery } from '../../lib/queries.ts';
 
@@ -13,5 +13,5 @@ export async function subjectLoader({ context, params, request }: LoaderFunction
     prime(context, subjectQuery(api, subject)),
     prime(context, pageQuery(api, { ...subject, page: 'overview' }, variant)),
   ]);
-  return { subject, variant, shownFor: variantQuery(variant) };
+  return { subject, variant };
 }

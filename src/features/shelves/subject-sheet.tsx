@@ -38,7 +38,12 @@ export function SubjectSheet(): ReactElement {
       sections={sectionsOfSubject(view, overview.outline)}
       foot={<TitleBlock address={address} view={overview} />}
     >
-      <PageHead title={`${overview.title} · Earthstrap`} description={overview.summary} canonical={path} listed={!overview.retired} />
+      <PageHead
+        title={`${overview.title} · Earthstrap`}
+        description={overview.summary}
+        canonical={path}
+        listed={!overview.retired}
+      />
       <FactsLine facts={view.facts} />
       {pages.length === 0 ? null : (
         <Section id={sectionIds.pages} title="Its pages">
