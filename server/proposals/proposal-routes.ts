@@ -7,7 +7,13 @@ import {
   sendBackBodySchema,
   versionBodySchema,
 } from '../../shared/contracts/bodies.ts';
-import { proposalsViewSchema, proposalViewSchema, shelfSchema, startViewSchema } from '../../shared/contracts/views.ts';
+import {
+  pageKindSchema,
+  proposalsViewSchema,
+  proposalViewSchema,
+  shelfSchema,
+  startViewSchema,
+} from '../../shared/contracts/views.ts';
 import { proposalStates } from '../../shared/proposals/proposal.ts';
 import { idParameters, revisionNumber } from '../http/route-parts.ts';
 import { defineRoute } from '../http/route.ts';
@@ -17,6 +23,7 @@ const startQuery = z.object({
   subject: z.string().max(64).optional(),
   page: z.string().max(64).optional(),
   revision: revisionNumber.optional().describe('An old revision to go back to.'),
+  kind: pageKindSchema.optional().describe('Of a new page that has no address yet: which kind it is to be.'),
 });
 
 const listQuery = z.object({
@@ -53,6 +60,7 @@ export const proposalRoutes = [
         subject: query.subject || null,
         page: query.page || null,
         revision: query.revision ?? null,
+        ...(query.kind === undefined ? {} : { kind: query.kind }),
       }),
   }),
   defineRoute({

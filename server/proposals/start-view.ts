@@ -19,7 +19,7 @@ function noSuchRevision(revision: number): Problem {
 
 /** What the editor starts from: the published text, an old revision of it to go back to, or a new page's skeleton. */
 export function startView(
-  { shelf, subject, page, revision }: StartRequest,
+  { shelf, subject, page, revision, kind: wanted = 'pinouts' }: StartRequest,
   member: Member,
   publication: PagePublication,
   reader: ProposalReader,
@@ -33,7 +33,7 @@ export function startView(
   const published = standing?.page ?? null;
   if (address === null || published === null) {
     if (revision !== null) return refuse(noSuchRevision(revision));
-    const kind = slug === null ? 'pinouts' : kindOfSlug(slug);
+    const kind = slug === null ? wanted : kindOfSlug(slug);
     return accept({ ...start, baseRevision: null, markdown: templateOf(kind), summary: '' });
   }
   const markdown = publication.markdown(address, revision ?? published.revision);

@@ -2,6 +2,7 @@ import type { Problem } from '../lib/problem.ts';
 import type { Result } from '../lib/result.ts';
 import type { PageAddress, Shelf, SubjectAddress } from '../pages/address.ts';
 import type { Variant } from '../pages/applicability.ts';
+import type { PageKind } from '../pages/page-kind.ts';
 import type { ProposalState } from '../proposals/proposal.ts';
 import type {
   DeclineBody,
@@ -40,6 +41,8 @@ export interface StartRequest {
   readonly page: string | null;
   /** An old revision to go back to. */
   readonly revision: number | null;
+  /** Of a new page that has no address yet: which kind it is to be. */
+  readonly kind?: PageKind;
 }
 
 /**

@@ -50,8 +50,8 @@ export function createHttpApi(fetcher: typeof fetch = fetch): Api {
     search: (text, bench, variant) => call('GET', `/search${query({ q: text, bench, ...variantText(variant) })}`),
 
     preview: (body) => call('POST', '/preview', body),
-    start: ({ shelf, subject, page, revision }) =>
-      call('GET', `/start${query({ shelf, subject, page, revision: revision === null ? null : String(revision) })}`),
+    start: ({ shelf, subject, page, revision, kind = null }) =>
+      call('GET', `/start${query({ shelf, subject, page, revision: revision === null ? null : String(revision), kind })}`),
     proposals: (state, mine) => call('GET', `/proposals${query({ state, mine: mine ? 'true' : null })}`),
     proposal: (id) => call('GET', proposalPath(id)),
     propose: (body) => call('POST', '/proposals', body),
