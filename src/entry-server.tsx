@@ -41,8 +41,8 @@ export type Rendered =
       /** The state that the browser goes on from, for `<!--state-->`: no script that runs. */
       readonly state: string;
       /**
-       * True where every visitor gets the same for this path, query and variant until something is published. False for
-       * members, for refusals, and for what depends on more of the reader than the variant that was passed in.
+       * True where every visitor with this bench gets the same at this address until something is published. False for
+       * members, for refusals, and for what answers a form.
        */
       readonly keepable: boolean;
     };
@@ -65,7 +65,11 @@ export async function render(request: Request, options: RenderOptions): Promise<
   try {
     const markup = renderToString(
       <Providers api={options.api} queryClient={queryClient}>
-        <StaticRouterProvider router={createStaticRouter(handler.dataRoutes, context)} context={context} hydrate={false} />
+        <StaticRouterProvider
+          router={createStaticRouter(handler.dataRoutes, context)}
+          context={context}
+          hydrate={false}
+        />
       </Providers>,
     );
     const { head, body } = splitHead(markup);
@@ -78,7 +82,7 @@ export async function render(request: Request, options: RenderOptions): Promise<
       head,
       body,
       state: `<script type="application/json" id="state">${state}</script>`,
-      keepable: request.method === 'GET' && isKeepable(context, queryClient, bench, new URL(request.url)),
+      keepable: request.method === 'GET' && isKeepable(context, queryClient, options.api),
     };
   } catch (error) {
     options.onError?.(error);
