@@ -40,6 +40,10 @@ function brief(difference: Difference): string[] {
 }
 
 describe('the difference of two texts', () => {
+  it('shows every line of a text that replaces nothing as added', () => {
+    expect(brief(differenceOf('', 'One.\n\nTwo.'))).toEqual(['+ One.', '+ ', '+ Two.']);
+  });
+
   it('shows nothing where nothing changed', () => {
     expect(brief(differenceOf('One.\n\nTwo.', 'One.\n\nTwo.'))).toEqual([]);
   });
@@ -132,7 +136,7 @@ describe('the difference of two texts', () => {
         const { lines } = differenceOf(from, to);
         const numbers = (side: 'fromLine' | 'toLine'): number[] =>
           lines.map((line) => line[side]).filter((number) => number !== null);
-        const counted = (text: string): number[] => text.split('\n').map((_, index) => index + 1);
+        const counted = (text: string): number[] => readTextLines(text).map((_, index) => index + 1);
         expect(numbers('fromLine')).toEqual(counted(from));
         expect(numbers('toLine')).toEqual(counted(to));
       }),

@@ -23,9 +23,10 @@ function shortenRule(cell: string): string {
 
 /**
  * Divides a text into lines at `\n`. A line that begins with `|` is a table's row: padding cells so that columns
- * align is no change, so its cells stand without it.
+ * align is no change, so its cells stand without it. An empty text has no lines.
  */
 export function readTextLines(text: string): TextLine[] {
+  if (text === '') return [];
   return text.split('\n').map((line) => {
     if (!/^\s*\|/.test(line)) return { text: line, table: false, cells: [] };
     const cells = cellsOf(line).map(shortenRule);
