@@ -93,7 +93,9 @@ export function oneOf<Name extends string>(
   const plain = text.toLowerCase().replace(/[\s_-]+/g, ' ');
   const found = names.find((candidate) => candidate.replace(/-/g, ' ') === plain);
   if (found === undefined) {
-    findings.push(unreadable(source, `has \`${name}="${text}"\`, which is not known. Write one of: ${names.join(', ')}.`));
+    findings.push(
+      unreadable(source, `has \`${name}="${text}"\`, which is not known. Write one of: ${names.join(', ')}.`),
+    );
   }
   return found ?? null;
 }
@@ -104,12 +106,22 @@ export function readColours(source: SourceBlock, page: PageOfBlock, findings: Fi
   if (text === null) return page.colours;
   const name = colourSystemNames.find((candidate) => candidate === text.toLowerCase());
   if (name === undefined) {
-    findings.push(unreadable(source, `has \`colours="${text}"\`, which is not known. Write one of: ${colourSystemNames.join(', ')}.`));
+    findings.push(
+      unreadable(
+        source,
+        `has \`colours="${text}"\`, which is not known. Write one of: ${colourSystemNames.join(', ')}.`,
+      ),
+    );
     return page.colours;
   }
   if (name !== 'own') return { name };
   if (page.colours.name !== 'own') {
-    findings.push(unreadable(source, 'has `colours="own"`, but the page has no key. Put `colours: own` and a `colour-key` in its front matter.'));
+    findings.push(
+      unreadable(
+        source,
+        'has `colours="own"`, but the page has no key. Put `colours: own` and a `colour-key` in its front matter.',
+      ),
+    );
   }
   return page.colours;
 }

@@ -52,7 +52,7 @@ export interface WrittenColour {
 }
 
 export type ConnectorColumn =
-  | 'cavity' | 'wire' | 'size' | 'circuit' | 'goes-to' | 'years' | 'markets' | 'frames' | 'note' | 'cite';
+  'cavity' | 'wire' | 'size' | 'circuit' | 'goes-to' | 'years' | 'markets' | 'frames' | 'note' | 'cite';
 
 /** A row of a connector: a wire in a cavity, or an empty cavity. */
 export interface ConnectorLine extends Line {
@@ -90,14 +90,34 @@ export interface ConnectorBlock extends BlockBase {
 }
 
 export const componentKinds = [
-  'battery', 'earth', 'splice', 'fuse', 'breaker', 'load', 'starter', 'motor', 'ignition-coil', 'relay', 'flasher',
-  'diode', 'resistor', 'ammeter', 'condenser', 'sender', 'alternator', 'dynamo', 'regulator', 'igniter', 'sensor',
-  'module', 'control-unit',
+  'battery',
+  'earth',
+  'splice',
+  'fuse',
+  'breaker',
+  'load',
+  'starter',
+  'motor',
+  'ignition-coil',
+  'relay',
+  'flasher',
+  'diode',
+  'resistor',
+  'ammeter',
+  'condenser',
+  'sender',
+  'alternator',
+  'dynamo',
+  'regulator',
+  'igniter',
+  'sensor',
+  'module',
+  'control-unit',
 ] as const;
 export type ComponentKind = (typeof componentKinds)[number];
 
 export type ComponentColumn =
-  | 'id' | 'kind' | 'name' | 'rating' | 'earthed-by' | 'zone' | 'years' | 'markets' | 'frames' | 'note' | 'cite';
+  'id' | 'kind' | 'name' | 'rating' | 'earthed-by' | 'zone' | 'years' | 'markets' | 'frames' | 'note' | 'cite';
 
 export interface ComponentLine extends Line {
   readonly id: string;
@@ -116,7 +136,18 @@ export interface ComponentsBlock extends BlockBase {
 }
 
 export const switchRoles = [
-  'ignition', 'kill', 'start', 'neutral', 'clutch', 'sidestand', 'brake', 'lights', 'dip', 'indicators', 'horn', 'other',
+  'ignition',
+  'kill',
+  'start',
+  'neutral',
+  'clutch',
+  'sidestand',
+  'brake',
+  'lights',
+  'dip',
+  'indicators',
+  'horn',
+  'other',
 ] as const;
 export type SwitchRole = (typeof switchRoles)[number];
 
@@ -143,7 +174,7 @@ export interface SwitchBlock extends BlockBase {
 }
 
 export type WireColumn =
-  | 'from' | 'to' | 'wire' | 'size' | 'length' | 'circuit' | 'years' | 'markets' | 'frames' | 'note' | 'cite';
+  'from' | 'to' | 'wire' | 'size' | 'length' | 'circuit' | 'years' | 'markets' | 'frames' | 'note' | 'cite';
 
 export interface WireLine extends Line {
   readonly from: TerminalName;
@@ -189,7 +220,7 @@ export interface InsideBlock extends BlockBase {
 }
 
 export type CheckColumn =
-  | 'check' | 'between' | 'expect' | 'at' | 'how' | 'years' | 'markets' | 'frames' | 'note' | 'cite';
+  'check' | 'between' | 'expect' | 'at' | 'how' | 'years' | 'markets' | 'frames' | 'note' | 'cite';
 
 export interface CheckLine extends Line {
   readonly check: string;

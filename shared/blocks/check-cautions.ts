@@ -17,10 +17,7 @@ interface Touch {
 }
 
 /** Finds the hazards that a page touches without a caution of them: one finding a hazard, where it is touched first. */
-export function checkCautions(
-  blocks: readonly Block[],
-  headings: readonly PageHeading[],
-): readonly Finding[] {
+export function checkCautions(blocks: readonly Block[], headings: readonly PageHeading[]): readonly Finding[] {
   const touches: readonly Touch[] = [
     ...blocks.flatMap((block) => hazardsTouched(block).map((kind) => touchOf(kind, block))),
     ...headings.flatMap(({ text, line }) =>
@@ -34,7 +31,9 @@ export function checkCautions(
     const touch = touches.find((one) => one.kind === kind);
     if (touch === undefined) continue;
     const message = `${touch.where} touches a hazard (${kind}) and the page has no caution of it. Put one that fits before the step: :::hazard{signal="warning" of="${kind}"}. Until then the book's own stands there.`;
-    findings.push(finding('caution-missing', message, touch.line, touch.address === null ? undefined : `#${touch.address}`));
+    findings.push(
+      finding('caution-missing', message, touch.line, touch.address === null ? undefined : `#${touch.address}`),
+    );
   }
   return findings;
 }

@@ -41,11 +41,15 @@ export function checkIds(blocks: readonly Block[], context: IdsElsewhere, overla
 
 function declaredIds(block: Block): readonly DeclaredId[] {
   // An inside block names a component that stands elsewhere.
-  const own = block.id === null || block.kind === 'inside' ? [] : [
-    { id: block.id, line: block.line, address: `#${block.id}`, applies: appliesToAll },
-  ];
+  const own =
+    block.id === null || block.kind === 'inside'
+      ? []
+      : [{ id: block.id, line: block.line, address: `#${block.id}`, applies: appliesToAll }];
   if (block.kind !== 'components') return own;
-  return [...own, ...block.lines.map(({ id, line, address, applies }) => ({ id, line, address: `#${address}`, applies }))];
+  return [
+    ...own,
+    ...block.lines.map(({ id, line, address, applies }) => ({ id, line, address: `#${address}`, applies })),
+  ];
 }
 
 function repeatedId({ id, line, address }: DeclaredId, where: string): Finding {

@@ -10,7 +10,10 @@ export function checkShafts(blocks: readonly Block[]): readonly Finding[] {
     if (block.kind !== 'switch' || block.movesWith === null) return [];
     const other = blocks.find(({ id, kind }) => id === block.movesWith && kind !== 'inside');
     if (other === undefined) return [];
-    const problem = other.kind === 'switch' && other !== block ? differentPositions(block, other) : `\`${block.movesWith}\` is no other switch`;
+    const problem =
+      other.kind === 'switch' && other !== block
+        ? differentPositions(block, other)
+        : `\`${block.movesWith}\` is no other switch`;
     if (problem === null) return [];
     const message = `The switch \`${block.id}\` moves with \`${block.movesWith}\`, but ${problem}. Both tables need the same positions, by the same names.`;
     return [finding('block-unreadable', message, block.line, `#${block.id}`)];

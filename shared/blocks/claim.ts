@@ -3,7 +3,15 @@ import type { Applicability } from '../pages/applicability.ts';
 import { formatYears } from '../pages/years.ts';
 import type { WireSize } from '../electrics/wire-sizes.ts';
 import type {
-  CheckLine, ComponentLine, ConnectorLine, InsideLine, SwitchLine, TableBlock, TerminalName, WireLine, WrittenColour,
+  CheckLine,
+  ComponentLine,
+  ConnectorLine,
+  InsideLine,
+  SwitchLine,
+  TableBlock,
+  TerminalName,
+  WireLine,
+  WrittenColour,
 } from './block.ts';
 import type { TableLine } from './lines.ts';
 import type { Rating } from './rating.ts';
@@ -76,7 +84,15 @@ function figures(rating: Rating | null): Claim | null {
   const { volts, amps, blow, watts, ohms, ampHours, feeds } = rating;
   const read = [volts, amps, watts, ohms, ampHours].some((figure) => figure !== null) || feeds.length > 0;
   if (!read) return [words(rating.written)];
-  return [volts, amps, blow, watts, ohms, ampHours, feeds.map(({ name, watts: power, amps: current }) => [name, power, current])];
+  return [
+    volts,
+    amps,
+    blow,
+    watts,
+    ohms,
+    ampHours,
+    feeds.map(({ name, watts: power, amps: current }) => [name, power, current]),
+  ];
 }
 
 function words(text: string | null): string | null {

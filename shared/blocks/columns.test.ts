@@ -5,7 +5,9 @@ const headings = { cavity: ['cavity', 'pin'], ...wireHeadings, ...commonHeadings
 
 describe('readColumns', () => {
   it('knows a column by any of its headings, in any order and case', () => {
-    const roles = readColumns(['NOTE', 'Pin', 'Color', 'mm²', 'Signal', ' **Years** '], headings).map(({ role }) => role);
+    const roles = readColumns(['NOTE', 'Pin', 'Color', 'mm²', 'Signal', ' **Years** '], headings).map(
+      ({ role }) => role,
+    );
     expect(roles).toEqual(['note', 'cavity', 'wire', 'size', 'circuit', 'years']);
   });
 

@@ -40,7 +40,10 @@ const hazardOfRole: Readonly<Partial<Record<SwitchRole, HazardKind>>> = {
 };
 
 const patterns: ReadonlyMap<HazardKind, RegExp> = new Map(
-  hazardKinds.map((kind) => [kind, new RegExp(`(?<![\\p{L}\\p{N}])(?:${hazardWords[kind].map(withPlural).join('|')})(?![\\p{L}\\p{N}])`, 'iu')]),
+  hazardKinds.map((kind) => [
+    kind,
+    new RegExp(`(?<![\\p{L}\\p{N}])(?:${hazardWords[kind].map(withPlural).join('|')})(?![\\p{L}\\p{N}])`, 'iu'),
+  ]),
 );
 
 function withPlural(words: string): string {

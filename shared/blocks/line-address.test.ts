@@ -54,7 +54,9 @@ describe('addresses of lines', () => {
   });
 
   it('hold no white space', () => {
-    expect(cavityAddress('headlight', 'A 1', 0, { ...inTheUk, markets: ['South Africa'] })).toBe('headlight.A-1~~South-Africa');
+    expect(cavityAddress('headlight', 'A 1', 0, { ...inTheUk, markets: ['South Africa'] })).toBe(
+      'headlight.A-1~~South-Africa',
+    );
   });
 });
 

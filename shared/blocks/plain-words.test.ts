@@ -14,7 +14,9 @@ it('leaves alone what only looks like a sign', () => {
 });
 
 it('leaves out blocks inside the text, with their tables', () => {
-  expect(plainWords('Before.\n\n:::wires\n| From | To |\n| - | - |\n| a.1 | b.1 |\n:::\n\nAfter.')).toBe('Before. After.');
+  expect(plainWords('Before.\n\n:::wires\n| From | To |\n| - | - |\n| a.1 | b.1 |\n:::\n\nAfter.')).toBe(
+    'Before. After.',
+  );
 });
 
 it('takes no longer than the text is long', () => {

@@ -39,7 +39,9 @@ export function readChecks(source: SourceBlock): BlockReading {
     const { common, unreadableYears } = readCommonCells(columns, row, head.cite);
     const check = plainCell(cellOf(columns, row, 'check'));
     if (check === '') {
-      findings.push(unreadRow(row, 'This row does not say what is checked. Write a few words under `Check`.', source.id));
+      findings.push(
+        unreadRow(row, 'This row does not say what is checked. Write a few words under `Check`.', source.id),
+      );
       return null;
     }
     const address = checkAddress(check, common.applies);
@@ -47,7 +49,9 @@ export function readChecks(source: SourceBlock): BlockReading {
     const expect = readExpectation(expectWritten);
     if (expect === null) {
       const said = expectWritten === '' ? 'Nothing is said of what to expect' : `“${expectWritten}” is no expectation`;
-      findings.push(finding('expect-unreadable', `${said}. Write ${expected}, each figure with its unit.`, row.line, `#${address}`));
+      findings.push(
+        finding('expect-unreadable', `${said}. Write ${expected}, each figure with its unit.`, row.line, `#${address}`),
+      );
     }
     findings.push(...checkRow(table, row, unreadableYears, address));
     const between = plainCell(cellOf(columns, row, 'between'));

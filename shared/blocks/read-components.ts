@@ -1,5 +1,11 @@
 import { finding, type Finding } from '../pages/finding.ts';
-import { componentKinds, type ComponentColumn, type ComponentKind, type ComponentLine, type ComponentsBlock } from './block.ts';
+import {
+  componentKinds,
+  type ComponentColumn,
+  type ComponentKind,
+  type ComponentLine,
+  type ComponentsBlock,
+} from './block.ts';
 import { idExpected, isBlockId, readHead, requireTable, unreadable, type BlockReading } from './block-reading.ts';
 import { cellText, plainCell } from './cell-text.ts';
 import { cellOf, commonHeadings, hasColumn, readColumns, type HeadingNames } from './columns.ts';

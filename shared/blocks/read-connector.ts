@@ -17,7 +17,15 @@ import { cellOf, commonHeadings, hasColumn, readColumns, wireHeadings, type Head
 import { cavityAddress } from './line-address.ts';
 import type { FaceLayout } from './face-layout.ts';
 import { mostCavities, readLayout } from './read-layout.ts';
-import { checkColour, checkRow, readColourCell, readCommonCells, readSizeCell, sortRows, unreadRow } from './read-row.ts';
+import {
+  checkColour,
+  checkRow,
+  readColourCell,
+  readCommonCells,
+  readSizeCell,
+  sortRows,
+  unreadRow,
+} from './read-row.ts';
 import { cavityNames } from './seats.ts';
 import type { SourceBlock } from './source-table.ts';
 import { readTerminalNames } from './terminal-name.ts';
@@ -29,7 +37,16 @@ const headings: HeadingNames<ConnectorColumn> = {
   ...commonHeadings,
 };
 const attributes = [
-  'zone', 'layout', 'seen', 'first', 'latch', 'contacts', 'housing', 'terminals', 'mates', 'colours',
+  'zone',
+  'layout',
+  'seen',
+  'first',
+  'latch',
+  'contacts',
+  'housing',
+  'terminals',
+  'mates',
+  'colours',
 ] as const;
 const sides: readonly FaceSide[] = ['wire side', 'mating side'];
 const corners: readonly Corner[] = ['top left', 'top right', 'bottom left', 'bottom right'];
@@ -44,7 +61,13 @@ export function readConnector(source: SourceBlock, page: PageOfBlock): BlockRead
   if (id === null || table === null) return { block: null, findings };
   const columns = readColumns(table.headings, headings);
   if (!hasColumn(columns, 'cavity')) {
-    findings.push(unreadable(source, 'has no column `Cavity` (or `Pin`). Name the column that says which cavity a row is about.', table.line));
+    findings.push(
+      unreadable(
+        source,
+        'has no column `Cavity` (or `Pin`). Name the column that says which cavity a row is about.',
+        table.line,
+      ),
+    );
     return { block: null, findings };
   }
   const head = readHead(source, attributes);
@@ -62,7 +85,7 @@ export function readConnector(source: SourceBlock, page: PageOfBlock): BlockRead
     const wireCell = cellOf(columns, row, 'wire');
     const goesToCell = plainCell(cellOf(columns, row, 'goes-to'));
     const circuit = cellText(cellOf(columns, row, 'circuit'));
-    const destinations = readTerminalNames(goesToCell);
+    const destinations = readTerminalNames(goesToCell).filter((name) => !isBlankWord(name.id));
     const goesTo = destinations.filter((name) => !isCapped(name.id));
     const blank = isBlank(wireCell, circuit, goesToCell) && destinations.length === 0;
     const wire = blank || isBlankWord(wireCell) ? null : readColourCell(wireCell, colours);
@@ -155,7 +178,8 @@ function unoriented(source: SourceBlock, hasLayout: boolean, hasSide: boolean): 
     : hasSide
       ? 'does not say where its first cavity is'
       : 'does not say from which side it is seen';
-  const settles = 'Look at the plug and write layout="2x3", seen="wire side" or "mating side", and first="top left" or another corner.';
+  const settles =
+    'Look at the plug and write layout="2x3", seen="wire side" or "mating side", and first="top left" or another corner.';
   const message = `${blockLabel(source)} ${missing}, so its numbering is not confirmed. ${settles}`;
   return finding('face-unoriented', message, source.line, source.id === null ? undefined : `#${source.id}`);
 }

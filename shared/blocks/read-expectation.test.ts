@@ -40,7 +40,14 @@ describe('readExpectation', () => {
     ['>= 0.2 V', 0.2, null, true, true],
     ['Min. 0.2 V', 0.2, null, true, true],
   ])('reads %j as a limit', (written, lowest, highest, lowestIncluded, highestIncluded) => {
-    expect(readExpectation(written)).toEqual({ kind: 'range', lowest, highest, lowestIncluded, highestIncluded, unit: 'V' });
+    expect(readExpectation(written)).toEqual({
+      kind: 'range',
+      lowest,
+      highest,
+      lowestIncluded,
+      highestIncluded,
+      unit: 'V',
+    });
   });
 
   it('reads continuity and open', () => {
@@ -49,8 +56,21 @@ describe('readExpectation', () => {
   });
 
   it.each([
-    '', 'About 5 Ω', '5 Ω', '5–7', '< 5', '5 ± 10 %', '50 % ± 5 %', '7–5 Ω', '5 Ω – 7 kΩ', '1,000–1,200 Ω', 'good', '5–7 teeth',
-    '5–7 Ω or so', '± 5 V', 'not open',
+    '',
+    'About 5 Ω',
+    '5 Ω',
+    '5–7',
+    '< 5',
+    '5 ± 10 %',
+    '50 % ± 5 %',
+    '7–5 Ω',
+    '5 Ω – 7 kΩ',
+    '1,000–1,200 Ω',
+    'good',
+    '5–7 teeth',
+    '5–7 Ω or so',
+    '± 5 V',
+    'not open',
   ])('finds no expectation in %j', (written) => {
     expect(readExpectation(written)).toBeNull();
   });

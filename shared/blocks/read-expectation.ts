@@ -7,7 +7,9 @@ const number = String.raw`[-−]?(?:\d+(?:[.,]\d+)?|[.,]\d+)`;
 const unit = String.raw`(?:[kMm]?(?:Ω|ohms?|Ohms?)|[mk]?V|v|[mµμ]?A|a|[mk]?W|m?Ah|[kM]?Hz|rpm|r/min|min⁻¹|1/min|°C|°F|K|°|deg(?:rees)?|%|[munpµμ]?F|[mµμ]?H|[mµμ]?s|µm|mm|cm|m|in|bar|k?Pa|psi|N·?m|kg|g|ml|[lL]|lx|cd)(?:\s*(?:AC|DC|peak|rms))?`;
 
 const range = new RegExp(`^(${number})\\s*(${unit})?\\s*(?:-|–|—|~|…|\\.{2,3}|to)\\s*(${number})\\s*(${unit})$`);
-const tolerance = new RegExp(`^(${number})\\s*(${unit})?\\s*(?:±|\\+\\s*/\\s*[-−–])\\s*(${number})\\s*(%)?\\s*(${unit})?$`);
+const tolerance = new RegExp(
+  `^(${number})\\s*(${unit})?\\s*(?:±|\\+\\s*/\\s*[-−–])\\s*(${number})\\s*(%)?\\s*(${unit})?$`,
+);
 const limit = new RegExp(`^(<|≤|<=|=<|>|≥|>=|=>|max\\.?|maximum|min\\.?|minimum)\\s*(${number})\\s*(${unit})$`, 'i');
 const limitAfter = new RegExp(`^(${number})\\s*(${unit})\\s*(max\\.?|maximum|min\\.?|minimum)$`, 'i');
 

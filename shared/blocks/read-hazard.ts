@@ -10,15 +10,20 @@ export function readHazard(source: SourceBlock): BlockReading {
   const findings: Finding[] = [];
   const signal = oneOf(source, 'signal', signalWords, findings);
   if (signal === null && attribute(source, 'signal') === null) {
-    findings.push(unreadable(source, `has no signal word. Write signal="warning" or another of: ${signalWords.join(', ')}.`));
+    findings.push(
+      unreadable(source, `has no signal word. Write signal="warning" or another of: ${signalWords.join(', ')}.`),
+    );
   }
   const text = plainWords(source.text);
-  if (text === '') findings.push(unreadable(source, 'says nothing. Write what the hazard is, what happens, and how to avoid it.'));
+  if (text === '')
+    findings.push(unreadable(source, 'says nothing. Write what the hazard is, what happens, and how to avoid it.'));
   const of: HazardKind[] = [];
   for (const name of namesIn(attribute(source, 'of') ?? '')) {
     const kind = hazardKinds.find((candidate) => candidate === name.toLowerCase());
     if (kind === undefined) {
-      findings.push(unreadable(source, `is \`of\` “${name}”, which is no hazard. Write one or more of: ${hazardKinds.join(', ')}.`));
+      findings.push(
+        unreadable(source, `is \`of\` “${name}”, which is no hazard. Write one or more of: ${hazardKinds.join(', ')}.`),
+      );
     } else if (!of.includes(kind)) {
       of.push(kind);
     }

@@ -40,7 +40,9 @@ export function readInside(source: SourceBlock): BlockReading {
       return null;
     }
     if (as === null) {
-      findings.push(unreadRow(row, `“${asWritten}” is nothing that a unit does inside. Write one of: ${joinsExpected}.`, id));
+      findings.push(
+        unreadRow(row, `“${asWritten}” is nothing that a unit does inside. Write one of: ${joinsExpected}.`, id),
+      );
       return null;
     }
     if (to === null && needsBothEnds(as.kind)) {

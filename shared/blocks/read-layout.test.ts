@@ -29,12 +29,25 @@ describe('readLayout', () => {
     expect(drawn(written)).toBe(face);
   });
 
-  it.each(['', '0', '2x0', '0x3', 'round 0', 'round', '...', '2x3x4', '3+', '+3', 'square', '-2', '999x999', '201', '9'.repeat(50)])(
-    'leaves %j unread',
-    (written) => {
-      expect(readLayout(written)).toBeNull();
-    },
-  );
+  it.each([
+    '',
+    '0',
+    '2x0',
+    '0x3',
+    'round 0',
+    'round',
+    '...',
+    '2x3x4',
+    '3+',
+    '+3',
+    'square',
+    '-2',
+    '999x999',
+    '201',
+    '9'.repeat(50),
+  ])('leaves %j unread', (written) => {
+    expect(readLayout(written)).toBeNull();
+  });
 
   it('counts rows × columns', () => {
     fc.assert(

@@ -11,7 +11,10 @@ const longestWritten = 400;
  */
 export function readLayout(text: string): FaceLayout | null {
   if (text.length > longestWritten) return null;
-  const plain = text.trim().toLowerCase().replace(/\s*([x×+.])\s*/g, '$1');
+  const plain = text
+    .trim()
+    .toLowerCase()
+    .replace(/\s*([x×+.])\s*/g, '$1');
   const ring = /^round (\d{1,3})$/.exec(plain.replace(/\s+/g, ' '));
   if (ring !== null) {
     const cavities = Number(ring[1]);
@@ -33,7 +36,8 @@ function gridRows(rows: number, columns: number): readonly (readonly boolean[])[
 function readRows(text: string): readonly (readonly boolean[])[] | null {
   const rows: (readonly boolean[])[] = [];
   for (const part of text.split('+')) {
-    if (/^[1-9]\d{0,2}$/.test(part)) rows.push(Array.from({ length: Math.min(Number(part), mostCavities + 1) }, () => true));
+    if (/^[1-9]\d{0,2}$/.test(part))
+      rows.push(Array.from({ length: Math.min(Number(part), mostCavities + 1) }, () => true));
     else if (/^[x.]+$/.test(part) && part.length <= mostCavities) rows.push([...part].map((seat) => seat === 'x'));
     else return null;
   }

@@ -26,12 +26,54 @@ describe('readRating', () => {
   });
 
   it.each([
-    ['dip 55 W, main 60 W', null, [{ name: 'dip', watts: 55, amps: null }, { name: 'main', watts: 60, amps: null }]],
-    ['12 V dip 55 W, main 60 W', 12, [{ name: 'dip', watts: 55, amps: null }, { name: 'main', watts: 60, amps: null }]],
-    ['12 V, main/dip 60/55 W', 12, [{ name: 'main', watts: 60, amps: null }, { name: 'dip', watts: 55, amps: null }]],
-    ['tail lamp 5 W; stop lamp 21 W', null, [{ name: 'tail-lamp', watts: 5, amps: null }, { name: 'stop-lamp', watts: 21, amps: null }]],
-    ['low 2,5 A, high 5 A', null, [{ name: 'low', watts: null, amps: 2.5 }, { name: 'high', watts: null, amps: 5 }]],
-    ['12 V 35/35 W', 12, [{ name: '1', watts: 35, amps: null }, { name: '2', watts: 35, amps: null }]],
+    [
+      'dip 55 W, main 60 W',
+      null,
+      [
+        { name: 'dip', watts: 55, amps: null },
+        { name: 'main', watts: 60, amps: null },
+      ],
+    ],
+    [
+      '12 V dip 55 W, main 60 W',
+      12,
+      [
+        { name: 'dip', watts: 55, amps: null },
+        { name: 'main', watts: 60, amps: null },
+      ],
+    ],
+    [
+      '12 V, main/dip 60/55 W',
+      12,
+      [
+        { name: 'main', watts: 60, amps: null },
+        { name: 'dip', watts: 55, amps: null },
+      ],
+    ],
+    [
+      'tail lamp 5 W; stop lamp 21 W',
+      null,
+      [
+        { name: 'tail-lamp', watts: 5, amps: null },
+        { name: 'stop-lamp', watts: 21, amps: null },
+      ],
+    ],
+    [
+      'low 2,5 A, high 5 A',
+      null,
+      [
+        { name: 'low', watts: null, amps: 2.5 },
+        { name: 'high', watts: null, amps: 5 },
+      ],
+    ],
+    [
+      '12 V 35/35 W',
+      12,
+      [
+        { name: '1', watts: 35, amps: null },
+        { name: '2', watts: 35, amps: null },
+      ],
+    ],
   ])('names the feeds of %j', (written, volts, feeds) => {
     expect(readRating(written)).toEqual({ written, ...nothing, volts, feeds });
   });

@@ -4,11 +4,35 @@ import type { Rating } from './rating.ts';
 const number = String.raw`\d+(?:[.,]\d+)?`;
 const unit = String.raw`mAh|Ah|kΩ|mΩ|Ω|[km]?ohms?|mA|A|amps?|V|volts?|kW|mW|W|watts?`;
 const quantityPattern = new RegExp(`(?:(\\d+)\\s*[x×]\\s*)?(${number})\\s*(${unit})(?![\\p{L}\\p{N}])`, 'giu');
-const pairPattern = new RegExp(`(?:([\\p{L}][\\p{L}\\p{N} -]*)/([\\p{L}][\\p{L}\\p{N} -]*?)\\s+)?(${number})\\s*W?\\s*/\\s*(${number})\\s*W(?![\\p{L}\\p{N}])`, 'iu');
-const feedPattern = new RegExp(`(?:^|[,;]\\s*|\\s)([\\p{L}][\\p{L}\\p{N} -]*?)\\s+(${number})\\s*(W|watts?|A|amps?)(?![\\p{L}\\p{N}])`, 'giu');
+const pairPattern = new RegExp(
+  `(?:([\\p{L}][\\p{L}\\p{N} -]*)/([\\p{L}][\\p{L}\\p{N} -]*?)\\s+)?(${number})\\s*W?\\s*/\\s*(${number})\\s*W(?![\\p{L}\\p{N}])`,
+  'iu',
+);
+const feedPattern = new RegExp(
+  `(?:^|[,;]\\s*|\\s)([\\p{L}][\\p{L}\\p{N} -]*?)\\s+(${number})\\s*(W|watts?|A|amps?)(?![\\p{L}\\p{N}])`,
+  'giu',
+);
 
 /** Words before a figure that do not name a feed. */
-const notFeeds = new Set(['blow', 'blows', 'blowing', 'continuous', 'max', 'min', 'fuse', 'rated', 'about', 'approx', 'bulb', 'bulbs', 'v', 'a', 'w', 'ah', 'x']);
+const notFeeds = new Set([
+  'blow',
+  'blows',
+  'blowing',
+  'continuous',
+  'max',
+  'min',
+  'fuse',
+  'rated',
+  'about',
+  'approx',
+  'bulb',
+  'bulbs',
+  'v',
+  'a',
+  'w',
+  'ah',
+  'x',
+]);
 
 /** A rating is a few figures; a longer text is a note in the wrong column. */
 const longestWritten = 200;
@@ -75,10 +99,7 @@ function readFeeds(text: string): readonly Feed[] {
   const pair = pairPattern.exec(text);
   if (pair !== null) {
     const [, firstName, secondName, first, second] = pair;
-    return [
-      feed(firstName ?? '1', numberOf(first ?? ''), null),
-      feed(secondName ?? '2', numberOf(second ?? ''), null),
-    ];
+    return [feed(firstName ?? '1', numberOf(first ?? ''), null), feed(secondName ?? '2', numberOf(second ?? ''), null)];
   }
   const feeds: Feed[] = [];
   for (const [, name, figure, unitWritten] of text.matchAll(feedPattern)) {

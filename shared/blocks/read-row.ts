@@ -136,4 +136,3 @@ export function sortRows<Row extends Line>(
   }
   return { lines, rest: unread.length === 0 ? {} : { unreadRows: unread } };
 }
-

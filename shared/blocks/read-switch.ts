@@ -22,7 +22,9 @@ export function readSwitch(source: SourceBlock): BlockReading {
   if (id === null || table === null) return { block: null, findings };
   const columns = contactColumns(readColumns(table.headings, headings));
   if (!hasColumn(columns, 'position')) {
-    findings.push(unreadable(source, 'has no column `Position`. Name the column that says where the switch stands.', table.line));
+    findings.push(
+      unreadable(source, 'has no column `Position`. Name the column that says where the switch stands.', table.line),
+    );
     return { block: null, findings };
   }
   const contacts = readContacts(source, columns, table.line, findings);
@@ -31,7 +33,13 @@ export function readSwitch(source: SourceBlock): BlockReading {
     const { common, unreadableYears } = readCommonCells(columns, row, head.cite);
     const position = plainCell(cellOf(columns, row, 'position'));
     if (position === '') {
-      findings.push(unreadRow(row, 'This row names no position. Write what stands beside the switch, or what one does with it.', id));
+      findings.push(
+        unreadRow(
+          row,
+          'This row names no position. Write what stands beside the switch, or what one does with it.',
+          id,
+        ),
+      );
       return null;
     }
     const address = positionAddress(id, position, common.applies);
@@ -63,10 +71,11 @@ export function readSwitch(source: SourceBlock): BlockReading {
 }
 
 /** Every column that is nothing else is a contact. */
-function contactColumns(
-  columns: readonly Column<Exclude<SwitchColumn, 'contact'>>[],
-): readonly Column<SwitchColumn>[] {
-  return columns.map(({ heading, role }) => ({ heading, role: role ?? (contactName(heading) === '' ? null : 'contact') }));
+function contactColumns(columns: readonly Column<Exclude<SwitchColumn, 'contact'>>[]): readonly Column<SwitchColumn>[] {
+  return columns.map(({ heading, role }) => ({
+    heading,
+    role: role ?? (contactName(heading) === '' ? null : 'contact'),
+  }));
 }
 
 function contactName(heading: string): string {
@@ -82,7 +91,9 @@ function readContacts(
   const names = columns.filter(({ role }) => role === 'contact').map(({ heading }) => contactName(heading));
   const contacts = [...new Set(names)];
   if (contacts.length < names.length) {
-    findings.push(unreadable(source, 'has two contacts of one name. Give each terminal its own, as in `R1` and `R2`.', line));
+    findings.push(
+      unreadable(source, 'has two contacts of one name. Give each terminal its own, as in `R1` and `R2`.', line),
+    );
   }
   return contacts;
 }

@@ -1,11 +1,26 @@
 import { readDecimal } from '../lib/decimal.ts';
 import { finding, type Finding } from '../pages/finding.ts';
 import type { WireColumn, WireLine, WiresBlock } from './block.ts';
-import { readColours, readHead, requireTable, unreadable, type BlockReading, type PageOfBlock } from './block-reading.ts';
+import {
+  readColours,
+  readHead,
+  requireTable,
+  unreadable,
+  type BlockReading,
+  type PageOfBlock,
+} from './block-reading.ts';
 import { cellText, plainCell } from './cell-text.ts';
 import { cellOf, commonHeadings, hasColumn, readColumns, wireHeadings, type HeadingNames } from './columns.ts';
 import { wireAddress } from './line-address.ts';
-import { checkColour, checkRow, readColourCell, readCommonCells, readSizeCell, sortRows, unreadRow } from './read-row.ts';
+import {
+  checkColour,
+  checkRow,
+  readColourCell,
+  readCommonCells,
+  readSizeCell,
+  sortRows,
+  unreadRow,
+} from './read-row.ts';
 import type { SourceBlock } from './source-table.ts';
 import { readTerminalName } from './terminal-name.ts';
 
@@ -34,7 +49,9 @@ export function readWires(source: SourceBlock, page: PageOfBlock): BlockReading 
     const from = readTerminalName(cellText(cellOf(columns, row, 'from')) ?? '');
     const to = readTerminalName(cellText(cellOf(columns, row, 'to')) ?? '');
     if (from === null || to === null) {
-      findings.push(unreadRow(row, 'A wire has two ends. Write both as terminals: battery.+ and main-fuse.in.', source.id));
+      findings.push(
+        unreadRow(row, 'A wire has two ends. Write both as terminals: battery.+ and main-fuse.in.', source.id),
+      );
       return null;
     }
     const address = wireAddress(from, to, common.applies);

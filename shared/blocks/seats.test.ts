@@ -7,7 +7,10 @@ import { cavitiesOutside, cavityNames, seatsOf } from './seats.ts';
 function connector(layout: string, first: string | null, cavities: readonly string[]): ConnectorBlock {
   const attributes = `layout="${layout}" seen="wire side"${first === null ? '' : ` first="${first}"`}`;
   const rows = cavities.map((cavity) => `| ${cavity} | Y |`);
-  return blockOf('connector', [`:::connector{#plug ${attributes}}`, '| Cavity | Wire |', '| - | - |', ...rows, ':::'].join('\n')).block;
+  return blockOf(
+    'connector',
+    [`:::connector{#plug ${attributes}}`, '| Cavity | Wire |', '| - | - |', ...rows, ':::'].join('\n'),
+  ).block;
 }
 
 /** The face as one sees it: each row's cavities from left to right. */

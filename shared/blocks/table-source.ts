@@ -3,7 +3,8 @@ import type { ColumnAlignment, SourceTable, SourceTableRow } from './source-tabl
 
 const delimiterCell = /^:?-+:?$/;
 /** What ends a table besides an empty line: a directive's fence, a quote, a heading, a code fence, a list, a rule. */
-const otherBlock = /^(?: {0,3}(?::{3,}|>|#{1,6}(?:\s|$)|`{3,}|~{3,}|[-*+]\s|1[.)]\s)|\s*(?:(?:\*\s*){3,}|(?:_\s*){3,})$)/;
+const otherBlock =
+  /^(?: {0,3}(?::{3,}|>|#{1,6}(?:\s|$)|`{3,}|~{3,}|[-*+]\s|1[.)]\s)|\s*(?:(?:\*\s*){3,}|(?:_\s*){3,})$)/;
 
 /**
  * Reads the first GFM table in a source text; null where it has none. Cells are their source text, trimmed, with `\|`
@@ -26,7 +27,12 @@ export function parseTable(text: string, firstLine: number): SourceTable | null 
   return null;
 }
 
-function readRows(lines: readonly string[], from: number, columns: number, firstLine: number): readonly SourceTableRow[] {
+function readRows(
+  lines: readonly string[],
+  from: number,
+  columns: number,
+  firstLine: number,
+): readonly SourceTableRow[] {
   const rows: SourceTableRow[] = [];
   for (let at = from; at < lines.length; at += 1) {
     const line = lines[at] ?? '';

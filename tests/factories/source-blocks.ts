@@ -19,9 +19,18 @@ export function sourceBlock(text: string): SourceBlock {
   const { id, ...attributes } = node.attributes ?? {};
   const inner = text.split('\n').slice(line, node.type === 'leafDirective' ? line : endLine - 1);
   const table = parseTable(inner.join('\n'), line + 1);
-  const rest = table === null ? inner : inner.filter((_, at) => !isOfTable(at + line + 1, table.line, table.rows.length));
+  const rest =
+    table === null ? inner : inner.filter((_, at) => !isOfTable(at + line + 1, table.line, table.rows.length));
   const written = Object.entries(attributes).map(([name, value]): [string, string] => [name, value ?? '']);
-  return { name: node.name, id: id ?? null, attributes: Object.fromEntries(written), table, text: rest.join('\n'), line, endLine };
+  return {
+    name: node.name,
+    id: id ?? null,
+    attributes: Object.fromEntries(written),
+    table,
+    text: rest.join('\n').trim(),
+    line,
+    endLine,
+  };
 }
 
 function isOfTable(line: number, first: number, rows: number): boolean {
@@ -35,7 +44,8 @@ export function blockOf<Kind extends Block['kind']>(
   colours: ColourSystem = { name: 'jis' },
 ): { readonly block: Extract<Block, { kind: Kind }>; readonly findings: readonly Finding[] } {
   const { block, findings } = readBlock(sourceBlock(text), { colours });
-  if (block === null || !isOfKind(block, kind)) throw new Error(`No ${kind}: ${findings.map(({ message }) => message).join(' ')}`);
+  if (block === null || !isOfKind(block, kind))
+    throw new Error(`No ${kind}: ${findings.map(({ message }) => message).join(' ')}`);
   return { block, findings };
 }
 
