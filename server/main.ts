@@ -37,12 +37,15 @@ function listen(server: Server, { settings }: Context): Promise<void> {
 }
 
 function greeting(server: Server, { settings, services }: Context): string {
-  const address = server.address();
-  const port = typeof address === 'object' && address !== null ? address.port : settings.port;
-  const shown = settings.baseUrl.hostname === settings.host ? new URL(`${settings.baseUrl.protocol}//${settings.baseUrl.hostname}:${port}`) : settings.baseUrl;
-  const open = `Earthstrap is open at ${shown.origin}`;
+  const open = `Earthstrap is open at ${settings.port === 0 ? originOf(server) : settings.baseUrl.origin}`;
   if (!services.members.hasMember('hobbyist@earthstrap.example')) return open;
   return `${open} (sign in as hobbyist@, writer@, moderator@, second-moderator@ or admin@earthstrap.example with the password ${demoPassword})`;
+}
+
+/** Where the server listens, if it was left to choose its port. */
+function originOf(server: Server): string {
+  const address = server.address();
+  return typeof address === 'object' && address !== null ? `http://${address.address}:${address.port}` : String(address);
 }
 
 /** Takes no more requests, lets those that were begun end, and closes the store. */
