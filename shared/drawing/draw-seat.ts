@@ -1,10 +1,9 @@
 import { colourHex } from '../wire-colours/palette.ts';
+import { drawInsulation, insulation } from './draw-insulation.ts';
 import { element, type Drawing } from './drawing.ts';
-import type { FaceWire } from './face.ts';
 import { seatSize, type PlacedSeat } from './face-plan.ts';
-import { letterInk } from './ink.ts';
 
-const corner = 7;
+const corner = 8;
 
 /** How a seat is shown. */
 export interface SeatLook {
@@ -12,34 +11,39 @@ export interface SeatLook {
   readonly href: string | null;
   /** What the contact looks like from the mating side; null from the wire side. */
   readonly contact: 'pins' | 'sockets' | null;
-  readonly first: boolean;
+  /** Towards which corner of the housing the first cavity stands, -1 or 1 across and down; null for all others. */
+  readonly first: { readonly across: number; readonly down: number } | null;
 }
 
-/** One cavity with what is in it, its number, and the double ring that marks the chosen one (hidden until it is). */
+/**
+ * One cavity: its wall, the wire's insulation in it with its letters, its number on a small plate of its own, so that it
+ * is read on any colour; the double ring of the chosen one is there and hidden until it is chosen.
+ */
 export function drawSeat({ seat, x, y }: PlacedSeat, look: SeatLook): Drawing {
   const name = seat.cavity ?? String(seat.number);
-  const wires = seat.wires;
+  // Two wires need the room beside the number for their letters; the other seats show the contact.
+  const contact = seat.wires.length > 1 ? null : look.contact;
+  const plate = numberPlate(seat.more ? `${shortName(name)}+` : shortName(name), contact);
+  const doubtful = seat.state === 'unwritten' || seat.state === 'set back';
   const children = [
-    ring(x, y, look.ringed),
-    ...(wires.length === 0 ? emptySeat(x, y, name, seat.state === 'blank') : filledSeat(x, y, name, wires)),
-    element('rect', {
-      class: `seat-outline seat-${seat.state.replace(' ', '-')}`,
-      x,
-      y,
-      width: seatSize,
-      height: seatSize,
-      rx: corner,
+    look.first === null ? null : firstSign(look.first.across, look.first.down),
+    // The whole square takes a tap, the hatched and empty part too.
+    box(0, { class: 'seat-ground', fill: 'none', 'pointer-events': 'all' }),
+    box(1, {
+      class: 'seat-wall',
       fill: 'none',
       stroke: 'currentColor',
-      'stroke-width': 1.75,
-      'stroke-dasharray': seat.state === 'unwritten' || seat.state === 'set back' ? '3 4' : undefined,
+      'stroke-width': 1.5,
+      'stroke-dasharray': doubtful ? '4 3' : undefined,
     }),
-    seat.state === 'capped' ? cap(x, y) : null,
-    look.contact === null ? null : contactSign(x, y, look.contact, wires[0] ?? null),
-    look.first ? firstSign(x, y) : null,
+    ...(seat.wires.length === 0 ? emptySeat(seat.state === 'blank') : drawInsulation(seat.wires, seat.either, plate.width)),
+    seat.state === 'capped' ? cap() : null,
+    ring(look.ringed),
+    ...plate.drawings,
   ];
   const attributes = {
-    class: `seat${look.ringed ? ' ringed' : ''}`,
+    class: ['seat', `seat-${seat.state.replace(' ', '-')}`, look.ringed ? 'ringed' : ''].filter((word) => word !== '').join(' '),
+    transform: `translate(${x} ${y})`,
     'data-seat': seat.number,
     'data-cavity': name,
     'aria-label': seat.words,
@@ -49,143 +53,106 @@ export function drawSeat({ seat, x, y }: PlacedSeat, look: SeatLook): Drawing {
     : element('a', { ...attributes, href: look.href }, ...children);
 }
 
-function ring(x: number, y: number, shown: boolean): Drawing {
-  const circle = (distance: number): Drawing =>
-    element('rect', {
-      x: x - distance,
-      y: y - distance,
-      width: seatSize + distance * 2,
-      height: seatSize + distance * 2,
-      rx: corner + distance,
-      fill: 'none',
-      stroke: 'currentColor',
-      'stroke-width': 2,
-    });
-  return element('g', { class: 'ring', display: shown ? undefined : 'none' }, circle(3), circle(7));
+function box(inset: number, attributes: Readonly<Record<string, string | number | undefined>>): Drawing {
+  const size = seatSize - inset * 2;
+  return element('rect', { x: inset, y: inset, width: size, height: size, rx: corner - inset, ...attributes });
 }
 
-function emptySeat(x: number, y: number, name: string, blank: boolean): Drawing[] {
-  const strokes = Array.from({ length: 5 }, (_, at) => {
-    const reach = 12 + at * 11;
-    const from = Math.max(0, reach - (seatSize - 8));
-    return `M${x + 4 + from} ${y + 4 + reach - from}L${x + 4 + reach - from} ${y + 4 + from}`;
-  });
-  return [
-    element('rect', { class: 'seat-ground', x, y, width: seatSize, height: seatSize, rx: corner, fill: 'none' }),
-    ...(blank
-      ? [element('path', { class: 'hatch', d: strokes.join(''), fill: 'none', stroke: 'currentColor', 'stroke-width': 1 })]
-      : []),
+/** Ringed twice: once around the wall, once inside it; between the two the plate shows. */
+function ring(shown: boolean): Drawing {
+  const line = { fill: 'none', stroke: 'currentColor' };
+  return element(
+    'g',
+    { class: 'ring', visibility: shown ? undefined : 'hidden' },
+    box(0.5, { ...line, 'stroke-width': 4 }),
+    box(5.5, { ...line, 'stroke-width': 2.5 }),
+  );
+}
+
+/** An empty cavity is hatched; one that nobody has written down is left open. */
+function emptySeat(blank: boolean): readonly Drawing[] {
+  if (!blank) return [];
+  const { from, size } = insulation;
+  const step = 9;
+  const lines: string[] = [];
+  for (let reach = step; reach < size * 2; reach += step) {
+    const over = Math.max(0, reach - size);
+    lines.push(`M${from + over} ${from + reach - over}L${from + reach - over} ${from + over}`);
+  }
+  return [element('path', { class: 'hatch', d: lines.join(''), fill: 'none', stroke: 'currentColor', 'stroke-width': 1 })];
+}
+
+function shortName(name: string): string {
+  return name.length > 5 ? `${name.slice(0, 4)}…` : name;
+}
+
+/**
+ * The cavity's number on a plate at the top left, with a `+` after it where more wires are in the cavity; from the mating
+ * side also its contact.
+ */
+function numberPlate(
+  name: string,
+  contact: SeatLook['contact'],
+): { readonly width: number; readonly drawings: readonly Drawing[] } {
+  const letters = Math.max(17, 7 + [...name].reduce((sum, letter) => sum + (/[A-Z]/.test(letter) ? 10.5 : 8.5), 0));
+  const width = letters + (contact === null ? 0 : 11);
+  const drawings = [
+    element('path', {
+      class: 'seat-plate',
+      d: `M1 ${corner}a7 7 0 0 1 7 -7h${width - 7}v13a4 4 0 0 1 -4 4h${-(width - 4)}z`,
+      fill: colourHex.white,
+      stroke: 'currentColor',
+      'stroke-width': 1.5,
+    }),
     element(
       'text',
       {
-        class: 'seat-number on-paper',
-        x: x + seatSize / 2,
-        y: y + seatSize / 2 + 5,
+        class: 'seat-number',
+        x: 1 + letters / 2,
+        y: 14,
         'text-anchor': 'middle',
-        fill: 'currentColor',
+        'font-size': 13,
+        'font-weight': 700,
+        fill: colourHex.black,
       },
       name,
     ),
+    ...(contact === null ? [] : [contactSign(contact, letters)]),
   ];
+  return { width, drawings };
 }
 
-function filledSeat(x: number, y: number, name: string, wires: readonly FaceWire[]): Drawing[] {
-  const shown = wires.slice(0, 3);
-  const height = seatSize / shown.length;
-  const bands = shown.flatMap((wire, at) => drawBand(wire, x, y + at * height, height, at === 0, at === shown.length - 1));
-  const dividers = shown.slice(1).map((wire, at) =>
-    element('path', {
-      class: 'seat-divider',
-      d: `M${x} ${y + (at + 1) * height}h${seatSize}`,
-      fill: 'none',
-      stroke: 'currentColor',
-      'stroke-width': 1.5,
-      // A dashed line parts the wires of different bikes, a whole one two wires in one crimp.
-      'stroke-dasharray': wire.further ? undefined : '4 3',
-    }),
-  );
-  const base = shown[0]?.colour?.base;
-  const ink = base === undefined ? 'currentColor' : letterInk(base);
-  const number = element('text', { class: 'seat-number', x: x + 5, y: y + 14, fill: ink }, name);
-  const place = { x: x + seatSize + 2, y: y + seatSize - 2 };
-  const more = wires.length > 3 ? element('text', { class: 'seat-more', ...place, fill: 'currentColor' }, '…') : null;
-  return [...bands, ...dividers, number, ...(more === null ? [] : [more])];
-}
-
-function drawBand(wire: FaceWire, x: number, y: number, height: number, first: boolean, last: boolean): Drawing[] {
-  const base = wire.colour?.base ?? null;
-  const tracer = wire.colour?.tracer ?? null;
-  const stripe = height > 40 ? 13 : 7;
-  const body = base === null ? 'none' : colourHex[base];
-  const ink = base === null ? 'currentColor' : letterInk(base);
-  const letters = height > 40 ? y + (tracer === null ? 38 : 33) : y + (height - (tracer === null ? 0 : stripe)) / 2 + 5;
-  return [
-    element('path', { d: bandPath(x, y, height, first, last), fill: body }),
-    ...(tracer === null
-      ? []
-      : [
-          element('path', {
-            d: bandPath(x, y + height - stripe - (last ? 4 : 2), stripe, false, false),
-            fill: colourHex[tracer],
-          }),
-        ]),
-    element(
-      'text',
-      {
-        class: height > 40 ? 'seat-letters' : 'seat-letters small',
-        x: x + seatSize / 2 + (height > 40 || !first ? 0 : 6),
-        y: Math.round(letters * 10) / 10,
-        'text-anchor': 'middle',
-        fill: ink,
-      },
-      wire.code.length > 6 ? `${wire.code.slice(0, 5)}…` : wire.code,
-    ),
-  ];
-}
-
-/** A band across the seat; the first has the seat's upper corners, the last its lower ones. */
-function bandPath(x: number, y: number, height: number, first: boolean, last: boolean): string {
-  const upper = first ? corner : 0;
-  const lower = last ? corner : 0;
-  return [
-    `M${x + upper} ${y}h${seatSize - upper * 2}`,
-    upper > 0 ? `a${upper} ${upper} 0 0 1 ${upper} ${upper}` : '',
-    `v${height - upper - lower}`,
-    lower > 0 ? `a${lower} ${lower} 0 0 1 ${-lower} ${lower}` : '',
-    `h${-(seatSize - lower * 2)}`,
-    lower > 0 ? `a${lower} ${lower} 0 0 1 ${-lower} ${-lower}` : '',
-    `v${-(height - upper - lower)}`,
-    upper > 0 ? `a${upper} ${upper} 0 0 1 ${upper} ${-upper}` : '',
-    'z',
-  ].join('');
-}
-
-/** A live lead that ends insulated wears a cap. */
-function cap(x: number, y: number): Drawing {
+/** A live lead that ends insulated wears a cap over its end. */
+function cap(): Drawing {
+  const middle = seatSize / 2;
   return element('path', {
     class: 'seat-cap',
-    d: `M${x + 12} ${y - 2}v-6h${seatSize - 24}v6`,
-    fill: 'none',
+    d: `M${middle - 4} ${seatSize - 3}v-8h20v8M${middle} ${seatSize - 7}h12`,
+    fill: colourHex.white,
     stroke: 'currentColor',
-    'stroke-width': 1.75,
+    'stroke-width': 1.5,
   });
 }
 
-function contactSign(x: number, y: number, contact: 'pins' | 'sockets', wire: FaceWire | null): Drawing {
-  const base = wire?.colour?.base;
-  const ink = base === undefined ? 'currentColor' : letterInk(base);
-  return element('circle', {
-    class: 'seat-contact',
-    cx: x + seatSize - 10,
-    cy: y + 10,
-    r: contact === 'pins' ? 2.5 : 3.5,
-    fill: contact === 'pins' ? ink : 'none',
-    stroke: ink,
-    'stroke-width': 1.25,
+/** A pin is solid, a socket hollow. */
+function contactSign(contact: 'pins' | 'sockets', x: number): Drawing {
+  const inset = contact === 'pins' ? 0 : 0.75;
+  return element('rect', {
+    class: `seat-contact contact-${contact}`,
+    x: x + inset,
+    y: 5.5 + inset,
+    width: 8 - inset * 2,
+    height: 8 - inset * 2,
+    fill: contact === 'pins' ? colourHex.black : 'none',
+    stroke: contact === 'pins' ? 'none' : colourHex.black,
+    'stroke-width': 1.5,
   });
 }
 
-/** The first cavity wears a small solid corner outside its frame. */
-function firstSign(x: number, y: number): Drawing {
-  return element('path', { class: 'first-sign', d: `M${x - 9} ${y - 9}h13l-13 13z`, fill: 'currentColor' });
+/** The first cavity wears a solid corner, outside its wall and towards the corner from which one counts. */
+function firstSign(across: number, down: number): Drawing {
+  const middle = seatSize / 2;
+  const x = middle + across * (middle + 6);
+  const y = middle + down * (middle + 6);
+  return element('path', { class: 'first-sign', d: `M${x} ${y}h${-across * 17}L${x} ${y - down * 17}z`, fill: 'currentColor' });
 }

@@ -5,39 +5,40 @@ import { planFace, seatSize } from './face-plan.ts';
 
 /** A face too small to read: which connector it is, at a glance, by its shape and colours. Says nothing to a screen reader. */
 export function drawFaceThumbnail(face: Face): Drawing {
-  const plan = planFace(face, face.seen, 0);
-  const { housing } = plan;
-  const box =
-    housing.kind === 'box'
-      ? housing
-      : { x: housing.x - housing.radius, y: housing.y - housing.radius, width: housing.radius * 2, height: housing.radius * 2 };
+  const { housing, seats } = planFace(face, face.seen, 0);
+  const margin = 4;
   const frame = { fill: 'none', stroke: 'currentColor', 'stroke-width': 5 };
-  const seats = plan.seats.flatMap(({ seat, x, y }) => {
-    const colour = seat.wires[0]?.colour ?? null;
-    const place = { x, y, width: seatSize, rx: 6 };
+  const { round, x, y, width, height } = housing;
+  const drawnSeats = seats.flatMap(({ seat, ...corner }) => {
+    const colour = seat.wires[0]?.colours[0];
+    const inside = { x: corner.x + 3, y: corner.y + 3, width: seatSize - 6, height: seatSize - 6, rx: 6 };
+    const outline = element('rect', { ...inside, fill: 'none', stroke: 'currentColor', 'stroke-width': 3.5 });
+    if (colour === undefined) return [outline];
+    const { base, tracer } = colour;
+    const band = { x: inside.x, y: corner.y + 30, width: inside.width, height: 15 };
     return [
-      element('rect', { ...place, height: seatSize, fill: colour === null ? 'none' : colourHex[colour.base] }),
-      ...(colour?.tracer ? [element('rect', { x, y: y + 34, width: seatSize, height: 16, fill: colourHex[colour.tracer] })] : []),
-      element('rect', { ...place, height: seatSize, fill: 'none', stroke: 'currentColor', 'stroke-width': 4 }),
+      element('rect', { ...inside, fill: colourHex[base] }),
+      ...(tracer === null ? [] : [element('rect', { ...band, fill: colourHex[tracer] })]),
+      outline,
     ];
   });
-  const margin = 6;
+  const scale = 0.24;
   return element(
     'svg',
     {
       class: 'face-thumbnail',
-      viewBox: `${box.x - margin} ${box.y - margin} ${box.width + margin * 2} ${box.height + margin * 2}`,
-      height: 40,
+      viewBox: `${x - margin} ${y - margin} ${width + margin * 2} ${height + margin * 2}`,
+      width: Math.round((width + margin * 2) * scale),
+      height: Math.round((height + margin * 2) * scale),
       'aria-hidden': 'true',
       focusable: 'false',
     },
-    housing.kind === 'box'
-      ? element('rect', { x: box.x, y: box.y, width: box.width, height: box.height, rx: 6, ...frame })
-      : element('circle', { cx: housing.x, cy: housing.y, r: housing.radius, ...frame }),
-    ...seats,
+    round
+      ? element('circle', { cx: x + width / 2, cy: y + height / 2, r: width / 2, ...frame })
+      : element('rect', { x, y, width, height, rx: 8, ...frame }),
+    ...drawnSeats,
   );
 }
-
 /** Where each zone stands along the bike, from the headlight (0) to the tail (1). */
 const zonePlaces: Readonly<Record<string, number>> = {
   headlight: 0.08,

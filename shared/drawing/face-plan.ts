@@ -1,13 +1,19 @@
 import type { FaceSide, LatchSide } from '../blocks/block.ts';
 import type { Face, FaceSeat } from './face.ts';
 
-/** Sizes of a drawn face in CSS pixels: a cavity is wide enough for a thumb (48 px at least). */
-export const seatSize = 56;
-const seatPitch = 68;
-const housingMargin = 18;
-const paperMargin = 26;
+/**
+ * Sizes of a drawn face in CSS pixels. Six cavities in a row, shrunk to the 323 px that a narrow phone leaves, are still
+ * 48 px wide each, the least for a thumb (WCAG 2.2, 2.5.5); a longer row scrolls inside its plate.
+ */
+export const seatSize = 54;
+const seatGap = 3;
+const seatPitch = seatSize + seatGap;
+const wall = 8;
+const tongue = 13;
+const paperMargin = 2;
 const headroom = 30;
-const smallestWidth = 236;
+const smallestWidth = 196;
+const smallestUnconfirmed = 290;
 
 /** Where a seat is drawn: its top left corner. */
 export interface PlacedSeat {
@@ -16,15 +22,25 @@ export interface PlacedSeat {
   readonly y: number;
 }
 
+/** The housing's outline: a box, or a round one in the box around it. */
+export interface HousingPlan {
+  readonly round: boolean;
+  readonly x: number;
+  readonly y: number;
+  readonly width: number;
+  readonly height: number;
+}
+
 /** Everything that the drawing needs to know of where things stand. */
 export interface FacePlan {
   readonly width: number;
   readonly height: number;
-  readonly housing:
-    | { readonly kind: 'box'; readonly x: number; readonly y: number; readonly width: number; readonly height: number }
-    | { readonly kind: 'round'; readonly x: number; readonly y: number; readonly radius: number };
+  readonly housing: HousingPlan;
   readonly seats: readonly PlacedSeat[];
   readonly latch: LatchSide | null;
+  readonly mirrored: boolean;
+  /** The most cavities in a row; a ring counts as many as fit across it. */
+  readonly across: number;
 }
 
 /** The other side of a connector. */
@@ -41,78 +57,93 @@ export function turned(side: FaceSide): FaceSide {
 export function planFace(face: Face, side: FaceSide, footroom: number): FacePlan {
   const mirrored = side !== face.seen;
   const latch = mirrored ? mirroredLatch(face.latch) : face.latch;
-  return face.layout.kind === 'ring'
-    ? planRing(face.layout.cavities, face.seats, mirrored, latch, footroom)
-    : planRows(face.layout.rows, face.seats, mirrored, latch, footroom);
+  const { layout } = face;
+  const inner = layout.kind === 'ring' ? ringInner(face.seats) : rowsInner(layout.rows);
+  const margins = {
+    left: paperMargin + (latch === 'left' ? tongue : 0),
+    right: paperMargin + (latch === 'right' ? tongue : 0),
+    top: headroom + (latch === 'top' ? tongue : 0),
+    bottom: paperMargin + (latch === 'bottom' ? tongue : 0),
+  };
+  const housing = {
+    round: layout.kind === 'ring',
+    // Where the words are wider than the face, it stands at the left, under their beginning.
+    x: margins.left,
+    y: margins.top,
+    width: rounded(inner.width + wall * 2),
+    height: rounded(inner.height + wall * 2),
+  };
+  const width = Math.max(housing.width + margins.left + margins.right, face.oriented ? smallestWidth : smallestUnconfirmed);
+  const origin = { x: housing.x + wall, y: housing.y + wall };
+  const seats = face.seats.map((seat) => {
+    const { x, y } = placeOf(seat, inner, mirrored);
+    return { seat, x: rounded(origin.x + x), y: rounded(origin.y + y) };
+  });
+  return {
+    width: rounded(width),
+    height: rounded(housing.y + housing.height + margins.bottom + footroom),
+    housing,
+    seats,
+    latch,
+    mirrored,
+    across: Math.ceil(inner.width / seatPitch),
+  };
+}
+
+interface Inner {
+  readonly width: number;
+  readonly height: number;
+  readonly columns: readonly number[];
+  readonly radius: number;
+}
+
+function rowsInner(rows: readonly (readonly boolean[])[]): Inner {
+  const columns = rows.map((row) => row.length);
+  return { width: extent(Math.max(...columns)), height: extent(rows.length), columns, radius: 0 };
+}
+
+function ringInner(seats: readonly FaceSeat[]): Inner {
+  const radius = ringRadius(seats.flatMap(({ place }) => (place.kind === 'ring' ? [(place.degrees * Math.PI) / 180] : [])));
+  // The corners of the seats stay inside the circle.
+  const across = radius * 2 + seatSize * 1.25;
+  return { width: across, height: across, columns: [], radius };
+}
+
+/** The smallest circle on which upright squares at these angles stand beside one another without touching. */
+function ringRadius(angles: readonly number[]): number {
+  if (angles.length < 2) return 0;
+  const needed = angles.map((angle, at) => {
+    const next = angles[(at + 1) % angles.length] ?? 0;
+    const across = Math.abs(Math.sin(next) - Math.sin(angle));
+    const down = Math.abs(Math.cos(next) - Math.cos(angle));
+    return seatPitch / Math.max(across, down);
+  });
+  return Math.max(...needed);
+}
+
+function extent(seats: number): number {
+  return seats * seatPitch - seatGap;
+}
+
+/** The top left corner of a seat inside the housing's wall. */
+function placeOf({ place }: FaceSeat, inner: Inner, mirrored: boolean): { readonly x: number; readonly y: number } {
+  if (place.kind === 'ring') {
+    const angle = (place.degrees * Math.PI) / 180;
+    const across = Math.sin(angle) * inner.radius * (mirrored ? -1 : 1);
+    return {
+      x: inner.width / 2 + across - seatSize / 2,
+      y: inner.height / 2 - Math.cos(angle) * inner.radius - seatSize / 2,
+    };
+  }
+  // A shorter row stands in the middle, as staggered faces do.
+  const indent = (inner.width - extent(inner.columns[place.row] ?? 0)) / 2;
+  const fromLeft = indent + place.column * seatPitch;
+  return { x: mirrored ? inner.width - seatSize - fromLeft : fromLeft, y: place.row * seatPitch };
 }
 
 function mirroredLatch(latch: LatchSide | null): LatchSide | null {
   if (latch === 'left') return 'right';
   return latch === 'right' ? 'left' : latch;
-}
-
-function planRows(
-  rows: readonly (readonly boolean[])[],
-  seats: readonly FaceSeat[],
-  mirrored: boolean,
-  latch: LatchSide | null,
-  footroom: number,
-): FacePlan {
-  const columns = Math.max(...rows.map((row) => row.length));
-  const inner = columns * seatPitch - (seatPitch - seatSize);
-  const housingWidth = inner + housingMargin * 2;
-  const housingHeight = rows.length * seatPitch - (seatPitch - seatSize) + housingMargin * 2;
-  const width = Math.max(housingWidth + paperMargin * 2, smallestWidth);
-  const x = (width - housingWidth) / 2;
-  const y = headroom + paperMargin;
-  const placed = seats.flatMap((seat): PlacedSeat[] => {
-    if (seat.place.kind !== 'rows') return [];
-    const { row, column } = seat.place;
-    // A shorter row stands in the middle, as staggered faces do.
-    const indent = ((columns - (rows[row]?.length ?? columns)) * seatPitch) / 2;
-    const fromLeft = indent + column * seatPitch;
-    const left = mirrored ? inner - seatSize - fromLeft : fromLeft;
-    return [{ seat, x: x + housingMargin + left, y: y + housingMargin + row * seatPitch }];
-  });
-  return {
-    width,
-    height: y + housingHeight + paperMargin + footroom,
-    housing: { kind: 'box', x, y, width: housingWidth, height: housingHeight },
-    seats: placed,
-    latch,
-  };
-}
-
-function planRing(
-  cavities: number,
-  seats: readonly FaceSeat[],
-  mirrored: boolean,
-  latch: LatchSide | null,
-  footroom: number,
-): FacePlan {
-  const circle = cavities === 1 ? 0 : Math.max(seatPitch / (2 * Math.sin(Math.PI / Math.max(cavities, 2))), seatPitch * 0.6);
-  const radius = circle + seatSize / 2 + housingMargin;
-  const width = Math.max(radius * 2 + paperMargin * 2, smallestWidth);
-  const centre = { x: width / 2, y: headroom + paperMargin + radius };
-  const placed = seats.flatMap((seat): PlacedSeat[] => {
-    if (seat.place.kind !== 'ring') return [];
-    const angle = (seat.place.degrees * Math.PI) / 180;
-    const across = Math.sin(angle) * circle * (mirrored ? -1 : 1);
-    return [
-      {
-        seat,
-        x: rounded(centre.x + across - seatSize / 2),
-        y: rounded(centre.y - Math.cos(angle) * circle - seatSize / 2),
-      },
-    ];
-  });
-  return {
-    width: rounded(width),
-    height: rounded(centre.y + radius + paperMargin + footroom),
-    housing: { kind: 'round', x: rounded(centre.x), y: rounded(centre.y), radius: rounded(radius) },
-    seats: placed,
-    latch,
-  };
 }
 
 function rounded(pixels: number): number {
