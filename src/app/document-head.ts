@@ -1,4 +1,4 @@
-const hoisted = /^(?:<title>[^<]*<\/title>|<(?:meta|link)\b[^>]*>)/;
+const hoisted = /^(?:<title>[^<]*<\/title>|<(?:meta|link)\b(?:"[^"]*"|[^">])*>)/;
 
 /**
  * Parts a sheet's markup: React puts the title, the meta elements and the links that a sheet names before everything

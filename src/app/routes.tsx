@@ -32,7 +32,7 @@ export const routes: RouteObject[] = [
           { index: true, id: 'home', handle: kept, loader: homeLoader, Component: HomePage },
           ...memberRoutes,
           ...proposalRoutes,
-          { path: 'face', id: 'face', loader: nothing, action: faceAction },
+          { path: 'face', id: 'face', loader: nothing, action: faceAction, element: <></> },
           {
             path: 'bench',
             id: 'bench',
@@ -74,7 +74,7 @@ export const routes: RouteObject[] = [
             loader: compareLoader,
             lazy: async () => ({ Component: (await import('../features/pages/compare-sheet.tsx')).CompareSheet }),
           },
-          { path: '*', id: 'nothing', loader: nothing },
+          { path: '*', id: 'nothing', loader: nothing, element: <></> },
         ],
       },
     ],
