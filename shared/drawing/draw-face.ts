@@ -52,19 +52,25 @@ export function drawFace(face: Face, look: FaceLook): Drawing {
       'data-across': Math.min(plan.across, 40),
       role: 'group',
       'aria-label': `${look.title}, ${says.toLowerCase()}${latch}${doubt}`,
-      'font-family': 'inherit',
+      // All that is drawn inherits these.
+      fill: 'none',
+      stroke: 'currentColor',
+      'stroke-width': 1.5,
+      'text-anchor': 'middle',
+      'font-weight': 700,
+      'font-size': 13,
     },
-    element('text', { class: 'face-side-name', x: 2, y: 14, 'font-size': 14, fill: 'currentColor', 'aria-hidden': 'true' }, says),
+    words('face-side-name', 14, 14, says),
     ...drawHousing(plan, face.oriented),
     ...seats,
-    face.oriented
-      ? null
-      : element(
-          'text',
-          { class: 'face-unconfirmed', x: 2, y: plan.height - 8, 'font-size': 13, fill: 'currentColor', 'aria-hidden': 'true' },
-          'Numbering not confirmed: go by the colours',
-        ),
+    face.oriented ? null : words('face-unconfirmed', plan.height - 8, 13, 'Numbering not confirmed: go by the colours'),
   );
+}
+
+/** A line of words on the paper; the svg's own label says it to a screen reader. */
+function words(className: string, y: number, size: number, text: string): Drawing {
+  const attributes = { class: className, x: 2, y, 'font-size': size, 'font-weight': 400, 'text-anchor': 'start' };
+  return element('text', { ...attributes, fill: 'currentColor', stroke: 'none', 'aria-hidden': 'true' }, text);
 }
 
 /** Towards which corner of the housing a seat stands; the upper left one where it is in the middle. */

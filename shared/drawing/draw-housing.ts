@@ -1,16 +1,16 @@
 import { element, type Drawing } from './drawing.ts';
 import type { FacePlan, HousingPlan } from './face-plan.ts';
 
-const outline = { fill: 'none', stroke: 'currentColor', 'stroke-width': 2 };
-const fine = { fill: 'none', stroke: 'currentColor', 'stroke-width': 1 };
+const outline = { 'stroke-width': 2 };
+const fine = { 'stroke-width': 1 };
 
-/** The housing: its wall, its latch, and on a ring the pitch circle on which the cavities stand. Dashed while in doubt. */
+/** The housing: its wall, its latch, on a ring a mark at its centre. Dashed while the numbering is in doubt. */
 export function drawHousing({ housing, latch }: FacePlan, oriented: boolean): readonly Drawing[] {
   const dashes = oriented ? undefined : '7 4';
   return [
     ...(latch === null ? [] : drawLatch(housing, latch)),
     shape(housing, 0, { class: 'housing', ...outline, 'stroke-dasharray': dashes }),
-    ...(housing.round ? [pitchCircle(housing)] : []),
+    ...(housing.round ? [centreMark(housing)] : []),
   ];
 }
 
@@ -24,8 +24,8 @@ function shape(
     : element('rect', { x: x + inset, y: y + inset, width: width - inset * 2, height: height - inset * 2, rx: 5, ...attributes });
 }
 
-/** A chain line through the middle of a ring, as on a drawing of a flange. */
-function pitchCircle(housing: HousingPlan): Drawing {
+/** A small cross in the middle of a ring, as on a drawing of a flange. */
+function centreMark(housing: HousingPlan): Drawing {
   const centre = { x: housing.x + housing.width / 2, y: housing.y + housing.height / 2 };
   const arm = 7;
   return element('path', {
@@ -56,7 +56,7 @@ function drawLatch(housing: HousingPlan, latch: NonNullable<FacePlan['latch']>):
       'g',
       { class: 'latch', transform: turns[latch] },
       element('path', { d: `M${-half} 0v${-out + 4}q0 -4 4 -4h${half * 2 - 8}q4 0 4 4v${out - 4}`, ...outline }),
-      element('path', { d: ribs, ...fine, 'stroke-width': 1.5 }),
+      element('path', { d: ribs }),
     ),
   ];
 }

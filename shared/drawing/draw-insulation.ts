@@ -38,37 +38,46 @@ export function drawInsulation(wires: readonly FaceWire[], either: boolean, plat
 }
 
 function drawStrip(wire: FaceWire, strip: Strip, either: boolean): readonly Drawing[] {
-  const [colour] = wire.colours;
-  const frame = { x: from, y: round(strip.y), width: size, height: round(strip.height), rx: strip.only ? corner : either ? 0 : 3 };
-  const outline = { fill: 'none', stroke: 'currentColor', 'stroke-width': 1 };
-  if (colour === undefined) {
-    return [element('rect', { class: 'insulation-unknown', ...frame, ...outline, 'stroke-dasharray': '2 2' }), ...letters(wire, strip)];
+  const [colour, ...others] = wire.colours;
+  const frame = {
+    class: strip.only ? 'seat-inner' : undefined,
+    x: from,
+    y: round(strip.y),
+    width: size,
+    height: round(strip.height),
+    rx: strip.only ? corner : either ? 0 : 3,
+    'stroke-width': 1,
+  };
+  if (colour === undefined) return [element('rect', { ...frame, 'stroke-dasharray': '2 2' }), ...letters(wire, strip)];
+  if (others.length === 0) {
+    return [element('rect', { ...frame, fill: colourHex[colour.base] }), ...tracerOf(colour, strip, from, size), ...letters(wire, strip)];
   }
   // Letters that read as two colours are drawn as both, side by side, and never settled silently.
   const share = size / wire.colours.length;
-  const fills = wire.colours.flatMap((one, at) => fillOf(one, strip, from + at * share, share));
-  return [...fills, element('rect', { class: 'insulation-outline', ...frame, ...outline }), ...letters(wire, strip)];
+  const halves = wire.colours.flatMap((one, at) => {
+    const x = from + at * share;
+    const body = { x: round(x), y: round(strip.y), width: round(share), height: round(strip.height) };
+    return [element('rect', { ...body, fill: colourHex[one.base], stroke: 'none' }), ...tracerOf(one, strip, x, share)];
+  });
+  return [...halves, element('rect', frame), ...letters(wire, strip)];
 }
 
-function fillOf({ base, tracer }: WireColour, strip: Strip, x: number, width: number): readonly Drawing[] {
+/** The tracer as a band along the foot of the strip; a hairline keeps yellow apart from white, and black from blue. */
+function tracerOf({ base, tracer }: WireColour, strip: Strip, x: number, width: number): readonly Drawing[] {
+  if (tracer === null) return [];
   const band = strip.only ? 11 : Math.max(4, strip.height * 0.24);
   const y = strip.y + strip.height - band - (strip.only ? 4 : 1.5);
-  const place = { x: round(x), width: round(width) };
   return [
-    element('rect', { ...place, y: round(strip.y), height: round(strip.height), rx: strip.only && width === size ? corner : 1, fill: colourHex[base] }),
-    ...(tracer === null
-      ? []
-      : [
-          element('rect', { class: 'tracer', ...place, y: round(y), height: round(band), fill: colourHex[tracer] }),
-          // A hairline keeps yellow apart from white, and black from blue.
-          element('path', {
-            class: 'tracer-edge',
-            d: `M${place.x} ${round(y)}h${place.width}M${place.x} ${round(y + band)}h${place.width}`,
-            fill: 'none',
-            stroke: letterInk(base),
-            'stroke-width': 0.75,
-          }),
-        ]),
+    element('rect', {
+      class: 'tracer',
+      x: round(x + 0.5),
+      y: round(y),
+      width: round(width - 1),
+      height: round(band),
+      fill: colourHex[tracer],
+      stroke: letterInk(base),
+      'stroke-width': 0.75,
+    }),
   ];
 }
 
@@ -93,9 +102,8 @@ function letters({ code, colours }: FaceWire, strip: Strip): readonly Drawing[] 
       class: 'seat-letters',
       x: round(middle.x),
       y: round(middle.y + fontSize * 0.36),
-      'text-anchor': 'middle',
       'font-size': round(fontSize),
-      'font-weight': 700,
+      stroke: 'none',
       fill: colour === undefined ? 'currentColor' : isInDoubt ? colourHex.black : letterInk(colour.base),
     },
     written,
@@ -103,7 +111,7 @@ function letters({ code, colours }: FaceWire, strip: Strip): readonly Drawing[] 
   if (!isInDoubt) return [text];
   const half = { x: (widthOf(written) * fontSize) / 2 + 1, y: fontSize * 0.6 };
   const plate = { x: round(middle.x - half.x), y: round(middle.y - half.y), width: round(half.x * 2), height: round(half.y * 2), rx: 2 };
-  return [element('rect', { ...plate, fill: colourHex.white }), text];
+  return [element('rect', { ...plate, fill: colourHex.white, stroke: 'none' }), text];
 }
 
 /** How wide letters are in bold Merriweather, in ems; measured on its capitals, rounded up. */
@@ -115,8 +123,6 @@ function divider(y: number): Drawing {
   return element('path', {
     class: 'seat-divider',
     d: `M${from} ${round(y)}h${size}`,
-    fill: 'none',
-    stroke: 'currentColor',
     'stroke-width': 2,
     'stroke-dasharray': '5 3',
   });

@@ -5,6 +5,11 @@ import { seatSize, type PlacedSeat } from './face-plan.ts';
 
 const corner = 8;
 
+/*
+ * A seat inherits from its face: no fill, strokes of 1.5 in the current colour, bold letters in the middle. What differs
+ * is written on the element, so that a page with a hundred cavities stays small.
+ */
+
 /** How a seat is shown. */
 export interface SeatLook {
   readonly ringed: boolean;
@@ -17,7 +22,8 @@ export interface SeatLook {
 
 /**
  * One cavity: its wall, the wire's insulation in it with its letters, its number on a small plate of its own, so that it
- * is read on any colour; the double ring of the chosen one is there and hidden until it is chosen.
+ * is read on any colour. The chosen one is ringed twice: its wall and its insulation's edge (the style sheet does the
+ * same to the cavity whose row is the page's target).
  */
 export function drawSeat({ seat, x, y }: PlacedSeat, look: SeatLook): Drawing {
   const name = seat.cavity ?? String(seat.number);
@@ -27,22 +33,22 @@ export function drawSeat({ seat, x, y }: PlacedSeat, look: SeatLook): Drawing {
   const doubtful = seat.state === 'unwritten' || seat.state === 'set back';
   const children = [
     look.first === null ? null : firstSign(look.first.across, look.first.down),
-    // The whole square takes a tap, the hatched and empty part too.
-    box(0, { class: 'seat-ground', fill: 'none', 'pointer-events': 'all' }),
-    box(1, {
+    element('rect', {
       class: 'seat-wall',
-      fill: 'none',
-      stroke: 'currentColor',
-      'stroke-width': 1.5,
-      'stroke-dasharray': doubtful ? '4 3' : undefined,
+      ...box(1, corner - 1),
+      // The whole square takes a tap, where it is hatched or empty too.
+      'pointer-events': 'all',
+      'stroke-width': look.ringed ? 4 : undefined,
+      'stroke-dasharray': doubtful && !look.ringed ? '4 3' : undefined,
     }),
-    ...(seat.wires.length === 0 ? emptySeat(seat.state === 'blank') : drawInsulation(seat.wires, seat.either, plate.width)),
+    ...(seat.wires.length === 0 && seat.state === 'blank' ? [hatch()] : []),
+    ...drawInsulation(seat.wires, seat.either, plate.width),
+    seat.wires.length === 1 && !look.ringed ? null : innerRing(look.ringed),
     seat.state === 'capped' ? cap() : null,
-    ring(look.ringed),
     ...plate.drawings,
   ];
   const attributes = {
-    class: ['seat', `seat-${seat.state.replace(' ', '-')}`, look.ringed ? 'ringed' : ''].filter((word) => word !== '').join(' '),
+    class: `seat seat-${seat.state.replace(' ', '-')}${look.ringed ? ' ringed' : ''}`,
     transform: `translate(${x} ${y})`,
     'data-seat': seat.number,
     'data-cavity': name,
@@ -53,25 +59,23 @@ export function drawSeat({ seat, x, y }: PlacedSeat, look: SeatLook): Drawing {
     : element('a', { ...attributes, href: look.href }, ...children);
 }
 
-function box(inset: number, attributes: Readonly<Record<string, string | number | undefined>>): Drawing {
+function box(inset: number, radius: number): Readonly<Record<string, number>> {
   const size = seatSize - inset * 2;
-  return element('rect', { x: inset, y: inset, width: size, height: size, rx: corner - inset, ...attributes });
+  return { x: inset, y: inset, width: size, height: size, rx: radius };
 }
 
-/** Ringed twice: once around the wall, once inside it; between the two the plate shows. */
-function ring(shown: boolean): Drawing {
-  const line = { fill: 'none', stroke: 'currentColor' };
-  return element(
-    'g',
-    { class: 'ring', visibility: shown ? undefined : 'hidden' },
-    box(0.5, { ...line, 'stroke-width': 4 }),
-    box(5.5, { ...line, 'stroke-width': 2.5 }),
-  );
+/** The inner of the two rings, for seats whose one wire has no edge of its own to ring. */
+function innerRing(shown: boolean): Drawing {
+  return element('rect', {
+    class: 'seat-inner',
+    ...box(insulation.from, 4),
+    stroke: shown ? undefined : 'none',
+    'stroke-width': shown ? 2.5 : undefined,
+  });
 }
 
 /** An empty cavity is hatched; one that nobody has written down is left open. */
-function emptySeat(blank: boolean): readonly Drawing[] {
-  if (!blank) return [];
+function hatch(): Drawing {
   const { from, size } = insulation;
   const step = 9;
   const lines: string[] = [];
@@ -79,7 +83,7 @@ function emptySeat(blank: boolean): readonly Drawing[] {
     const over = Math.max(0, reach - size);
     lines.push(`M${from + over} ${from + reach - over}L${from + reach - over} ${from + over}`);
   }
-  return [element('path', { class: 'hatch', d: lines.join(''), fill: 'none', stroke: 'currentColor', 'stroke-width': 1 })];
+  return element('path', { class: 'hatch', d: lines.join(''), 'stroke-width': 1 });
 }
 
 function shortName(name: string): string {
@@ -95,28 +99,14 @@ function numberPlate(
   contact: SeatLook['contact'],
 ): { readonly width: number; readonly drawings: readonly Drawing[] } {
   const letters = Math.max(17, 7 + [...name].reduce((sum, letter) => sum + (/[A-Z]/.test(letter) ? 10.5 : 8.5), 0));
-  const width = letters + (contact === null ? 0 : 11);
+  const width = Math.min(letters + (contact === null ? 0 : 11), seatSize - 2);
   const drawings = [
     element('path', {
       class: 'seat-plate',
       d: `M1 ${corner}a7 7 0 0 1 7 -7h${width - 7}v13a4 4 0 0 1 -4 4h${-(width - 4)}z`,
       fill: colourHex.white,
-      stroke: 'currentColor',
-      'stroke-width': 1.5,
     }),
-    element(
-      'text',
-      {
-        class: 'seat-number',
-        x: 1 + letters / 2,
-        y: 14,
-        'text-anchor': 'middle',
-        'font-size': 13,
-        'font-weight': 700,
-        fill: colourHex.black,
-      },
-      name,
-    ),
+    element('text', { class: 'seat-number', x: 1 + letters / 2, y: 14, fill: colourHex.black, stroke: 'none' }, name),
     ...(contact === null ? [] : [contactSign(contact, letters)]),
   ];
   return { width, drawings };
@@ -129,24 +119,18 @@ function cap(): Drawing {
     class: 'seat-cap',
     d: `M${middle - 4} ${seatSize - 3}v-8h20v8M${middle} ${seatSize - 7}h12`,
     fill: colourHex.white,
-    stroke: 'currentColor',
-    'stroke-width': 1.5,
+    stroke: colourHex.black,
   });
 }
 
 /** A pin is solid, a socket hollow. */
 function contactSign(contact: 'pins' | 'sockets', x: number): Drawing {
   const inset = contact === 'pins' ? 0 : 0.75;
-  return element('rect', {
-    class: `seat-contact contact-${contact}`,
-    x: x + inset,
-    y: 5.5 + inset,
-    width: 8 - inset * 2,
-    height: 8 - inset * 2,
-    fill: contact === 'pins' ? colourHex.black : 'none',
-    stroke: contact === 'pins' ? 'none' : colourHex.black,
-    'stroke-width': 1.5,
-  });
+  const size = 8 - inset * 2;
+  const place = { class: `seat-contact contact-${contact}`, x: x + inset, y: 5.5 + inset, width: size, height: size };
+  return contact === 'pins'
+    ? element('rect', { ...place, fill: colourHex.black, stroke: 'none' })
+    : element('rect', { ...place, stroke: colourHex.black });
 }
 
 /** The first cavity wears a solid corner, outside its wall and towards the corner from which one counts. */
@@ -154,5 +138,5 @@ function firstSign(across: number, down: number): Drawing {
   const middle = seatSize / 2;
   const x = middle + across * (middle + 6);
   const y = middle + down * (middle + 6);
-  return element('path', { class: 'first-sign', d: `M${x} ${y}h${-across * 17}L${x} ${y - down * 17}z`, fill: 'currentColor' });
+  return element('path', { class: 'first-sign', d: `M${x} ${y}h${-across * 17}L${x} ${y - down * 17}z`, fill: 'currentColor', stroke: 'none' });
 }
