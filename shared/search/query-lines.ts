@@ -16,9 +16,13 @@ export interface LinesAnswer {
   readonly someWordsOnly: boolean;
   /** The words and codes that nothing in the book has. */
   readonly unanswered: readonly QueryTerm[];
+  /** True where one of those is so short that it may be a code, and no line is shown for the rest without it. */
+  readonly barred: boolean;
   readonly mended: TermMasks['mended'];
   /** Blocks that the words alone lead to, where the colour or cavity that is asked for is not there. */
   readonly elsewhere: readonly number[];
+  /** True where the query names a subject: alone (`only`), or some other one than that on the bench (`other`). */
+  readonly namesSubject: 'only' | 'other' | null;
   /** The bike that was meant: what was chosen, and a year or market that the query names. */
   readonly variant: Variant;
 }
@@ -48,9 +52,11 @@ export function queryLines(index: LinesIndex, query: ReadQuery, options: Partial
   const required = bitsOf(terms, (term, number) => isCode(term) || !masks.unanswered.has(number));
   const scan = createScan(index, terms, masks, { bench, variant, limit });
   const nothing = {
-    lines: [], count: 0, namesLine: false, someWordsOnly: false, unanswered, mended: masks.mended, elsewhere: [], variant,
+    lines: [], count: 0, namesLine: false, someWordsOnly: false, unanswered, barred, mended: masks.mended, elsewhere: [], variant,
+    namesSubject: scan.namesOtherSubject() ? ('other' as const) : null,
   };
-  if (required === 0 || scan.namesOnlySubject(required)) return nothing;
+  if (required === 0) return nothing;
+  if (scan.namesOnlySubject(required)) return { ...nothing, namesSubject: 'only' };
   const hasCode = terms.some(isCode);
   const all = barred ? { lines: [], count: 0, inLine: false } : scan.run(required, required);
   if (all.count > 0) return { ...nothing, ...all, namesLine: hasCode || all.inLine };

@@ -103,7 +103,7 @@ function readCode(tokens: readonly string[], at: number): ColourFound | null {
   const parts = plainText(token).split(/[/\\_-]/);
   const named = parts.map((part) => colourOfWords(part) ?? germanWords[part] ?? null);
   const [base, tracer] = named;
-  if (parts.length === 2 && base != null && tracer != null && base !== tracer) return { length: 1, colours: [{ base, tracer }] };
+  if (parts.length === 2 && base !== null && base !== undefined && tracer !== null && tracer !== undefined && base !== tracer) return { length: 1, colours: [{ base, tracer }] };
   if (!joinedCode.test(token) && !dividedCode.test(token)) return null;
   const colours = coloursInAnySystem(token);
   if (colours.length > 0) return { length: 1, colours };

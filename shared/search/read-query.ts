@@ -9,8 +9,18 @@ export type QueryTerm =
   | { readonly kind: 'colour'; readonly written: string; readonly colours: readonly ColourWanted[]; readonly words: readonly string[] }
   /** A cavity or terminal by name. `of` is the id it was written with, as in `headlight.3`. */
   | { readonly kind: 'cavity'; readonly written: string; readonly name: string; readonly of: string | null }
-  /** A number, or letters and numbers together: a cavity's name, a wire's size, or a word of a name, each exactly. */
-  | { readonly kind: 'number'; readonly written: string; readonly name: string; readonly words: readonly string[]; readonly last: boolean }
+  /**
+   * A number, or letters and numbers together: a cavity's name, a terminal, a wire's size, or a word of a name, each
+   * exactly. One with its unit is a rating and nothing else; a bare one is a rating only where a fuse is spoken of.
+   */
+  | {
+      readonly kind: 'number';
+      readonly written: string;
+      readonly name: string;
+      readonly words: readonly string[];
+      readonly rating: 'no' | 'maybe' | 'surely';
+      readonly last: boolean;
+    }
   | { readonly kind: 'size'; readonly written: string; readonly squareMillimetres: number }
   /** A word, or several that name one thing. Any of `words` will do; `single` is the plain word, for prefixes and slips. */
   | { readonly kind: 'word'; readonly written: string; readonly words: readonly string[]; readonly single: string | null; readonly last: boolean }
@@ -32,6 +42,7 @@ const longestQuery = 300;
 const cavityMarkers = new Set(['cavity', 'cav', 'pin', 'way', 'position', 'terminal', 'contact', 'no', 'number']);
 const yearPattern = /^(?:19[0-9]{2}|20[0-4][0-9])$/;
 const sizePattern = /^(\d+(?:[.,]\d+)?)(?:mm2|mm|sqmm|qmm)$/;
+const unitWords = /^(?:a|v|w|ah|amps?|amperes?|volts?|watts?|ohms?)$/;
 const terminalWithLetter = new Set(['15a', '49a', '56a', '56b', '57a', '87a', '87b', '31b', '30a', '15b', '50a']);
 
 /**
@@ -116,15 +127,16 @@ function readTokens(tokens: readonly string[], unfinished: boolean, dropFillers:
       at += 1;
       continue;
     }
-    const number = readNumber(word, speaksOfFuse);
+    const number = readNumber(word, speaksOfFuse, plain[at + 1] ?? '');
     if (number !== null) {
+      const length = number.rating === 'surely' && unitWords.test(plain[at + 1] ?? '') ? 2 : 1;
       flush(false);
-      terms.push({ kind: 'number', written: token, ...number, last: unfinished && at === tokens.length - 1 });
-      at += 1;
+      terms.push({ kind: 'number', written: tokens.slice(at, at + length).join(' '), ...number, last: unfinished && at === tokens.length - 1 });
+      at += length;
       continue;
     }
     for (const part of word.match(/[a-z0-9]+/g) ?? []) {
-      const numeric = readNumber(part, speaksOfFuse);
+      const numeric = readNumber(part, speaksOfFuse, '');
       if (numeric === null) waiting.push({ written: token, word: part });
       else {
         flush(false);
@@ -146,11 +158,22 @@ function readCavityAt(plain: readonly string[], at: number): { length: number; n
   return /^(?:\d{1,3}[a-z]?|[a-z]|[a-z]\d{1,2})\+*$/.test(name) ? { length: next - at + 1, name } : null;
 }
 
-function readNumber(word: string, speaksOfFuse: boolean): { name: string; words: string[] } | null {
+/** A number by itself or with its unit. A bare one below 5 before a single letter is a cavity before a colour: `3 W`. */
+function readNumber(word: string, speaksOfFuse: boolean, following: string): Pick<Extract<QueryTerm, { kind: 'number' }>, 'name' | 'words' | 'rating'> | null {
   if (!/^(?:\d+(?:\.\d+)?[a-z]{0,2}|[a-z]{1,2}\d*)\+*$/.test(word) || /^[a-z]+$/.test(word)) return null;
-  const rating = /^(\d+(?:\.\d+)?)(?:a|v|w|ah)$/.exec(word)?.[1];
-  if (rating !== undefined && (speaksOfFuse || !terminalWithLetter.has(word))) return { name: rating, words: [rating, word] };
-  return { name: word, words: [word] };
+  const attached = /^(\d+(?:\.\d+)?)(a|v|w|ah)$/.exec(word);
+  if (attached?.[1] !== undefined && attached[2] !== undefined && (speaksOfFuse || !terminalWithLetter.has(word))) {
+    return { name: attached[1], words: [word], rating: 'surely' };
+  }
+  if (!/^[\d.]+$/.test(word)) return { name: word, words: [word], rating: 'no' };
+  if (unitWords.test(following) && (following.length > 1 || Number(word) >= 5)) {
+    return { name: word, words: [word + unitOf(following)], rating: 'surely' };
+  }
+  return speaksOfFuse ? { name: word, words: [`${word}a`, word], rating: 'maybe' } : { name: word, words: [word], rating: 'no' };
+}
+
+function unitOf(written: string): string {
+  return written === 'ah' ? 'ah' : written.charAt(0);
 }
 
 /** True where the letters of a code may as well be a word: `sw` is black, and short for switch. */

@@ -35,8 +35,9 @@ function wantedWords({ base, tracer }: ColourWanted): string {
 }
 
 /** Words left out are said; so is that other words were not. */
-function remarkOnUnanswered({ unanswered, lines }: LinesAnswer, proseFound: boolean): string[] {
+function remarkOnUnanswered({ unanswered, lines, barred }: LinesAnswer, proseFound: boolean): string[] {
   const words = unanswered.filter(({ kind }) => kind === 'word').map(({ written }) => `“${written}”`);
+  if (words.length > 0 && barred) return [`No line says ${list(words, 'or')}: none is shown for the rest alone.`];
   if (words.length === 0 || (lines.length === 0 && proseFound)) return [];
   return [lines.length > 0 ? `No line says ${list(words, 'or')}, so that was left out.` : `Nothing in the book says ${list(words, 'or')}.`];
 }
@@ -76,10 +77,11 @@ function remarkOnVariant({ year }: ReadQuery, { variant, lines }: LinesAnswer): 
   return [...remarks, `${last} for ${bike}${setBack === lines.length ? '' : ' stand last'}: each says what it holds for.`];
 }
 
-function remarkOnBench({ subjects }: LinesIndex, { lines }: LinesAnswer, bench: string | null): string[] {
+function remarkOnBench({ subjects }: LinesIndex, { lines, namesSubject }: LinesAnswer, bench: string | null): string[] {
   const title = subjects.find(({ shelf, slug }) => shelf === 'donors' && slug === bench)?.title;
   if (title === undefined || lines.length === 0) return [];
   const ofBench = lines.filter(({ onBench }) => onBench).length;
+  if (namesSubject !== null) return [];
   if (ofBench === 0) return [`No line of ${title}, which is on your bench, answers this. These are other machines’: their colours say nothing about yours.`];
   return ofBench === lines.length ? [] : [`${title} is on your bench: its lines come first.`];
 }

@@ -27,6 +27,8 @@ export interface Scanned {
 export interface Scan {
   /** True where every term is part of one subject's name: then its pages answer, not all its lines. */
   namesOnlySubject(required: number): boolean;
+  /** True where a term is part of a subject's own name, other than the donor on the bench. */
+  namesOtherSubject(): boolean;
   /** Named blocks that the given terms lead to, those of the bench first. */
   holdersNamed(terms: number): readonly number[];
   /**
@@ -45,15 +47,17 @@ const kindWeights: Readonly<Record<HolderKind, number>> = {
   components: 0.9,
   switch: 0.6,
   wires: 0.6,
-  checks: 0.5,
-  inside: 0.3,
+  checks: -1,
+  inside: -1,
 };
 const safeModification = -2;
 const emptyCavity = -3;
+/** For the other side: a right indicator where the left one is asked for, found by its left cluster. */
+const otherSide = -6;
 const mostElsewhere = 3;
 const blankState = 1;
-/** Groups outweigh every score: lines that hold for the bike, then those of the bench, then those with more of the terms. */
-const groups = { applies: 2000, bench: 1000, term: 60 } as const;
+/** Groups outweigh every score: lines of the bench, then those with more of the terms. */
+const groups = { bench: 10_000, term: 500 } as const;
 /** No line's own score reaches this. */
 const mostScore = 300;
 
@@ -61,15 +65,20 @@ const lowHalf = (1 << exactShift) - 1;
 
 /** Prepares to look through an index for a query. */
 export function createScan(index: LinesIndex, terms: readonly QueryTerm[], found: TermMasks, options: LinesQueryOptions): Scan {
-  const { holders, pages, subjects, vocabulary, texts, details, colour, own, sizes, endStart, endIds, states } = index;
-  const { texts: masks, cavities, colours, sizes: sizeMasks } = found;
+  const { holders, pages, subjects, vocabulary, texts, details, colour, own, sizes, endStart, endIds, endTerminals, states } = index;
+  const { texts: masks, against, cavities, terminals, colours, sizes: sizeMasks } = found;
   const { offsets, units } = vocabulary;
   const applies = index.applicabilities.map((applicability) => appliesTo(applicability, options.variant));
   const addressed: Addressed[] = [];
   let canBeCavity = 0;
+  let bareNumbers = 0;
+  let ofAddresses = 0;
   terms.forEach((term, number) => {
     if (term.kind === 'cavity' || term.kind === 'number' || term.kind === 'colour') canBeCavity |= 1 << number;
-    if (term.kind === 'cavity' && term.of !== null) addressed.push(addressedTerm(index, term.of, term.name, 1 << number));
+    if (term.kind === 'number' && term.rating === 'no') bareNumbers |= 1 << number;
+    if (term.kind !== 'cavity' || term.of === null) return;
+    ofAddresses |= 1 << number;
+    addressed.push(addressedTerm(index, term.of, term.name, 1 << number));
   });
   const connectorTerms = canBeCavity === 0 ? null : termsOfConnectors(index, masks);
   const holds: Applies = { applies: true };
@@ -78,8 +87,31 @@ export function createScan(index: LinesIndex, terms: readonly QueryTerm[], found
     return masks[offsets.subjects + subject] ?? 0;
   }
 
+  /** The terms that name what a line leads to. */
+  function idsOfEnds(line: number): number {
+    let named = 0;
+    const last = endStart[line + 1] ?? 0;
+    for (let end = endStart[line] ?? 0; end < last; end += 1) named |= masks[offsets.ends + (endIds.places[end] ?? 0)] ?? 0;
+    return named;
+  }
+
+  /** The mask of the one end of a line that has all of these terms, its terminal among them; 0 where none has. */
+  function endThatHas(line: number, wanted: number): number {
+    const last = endStart[line + 1] ?? 0;
+    for (let end = endStart[line] ?? 0; end < last; end += 1) {
+      const terminal = (terminals[endTerminals.places[end] ?? 0] ?? 0) & ~ofAddresses;
+      const both = terminal | (masks[offsets.ends + (endIds.places[end] ?? 0)] ?? 0);
+      if ((terminal & wanted) !== 0 && (both & wanted) === wanted) return both;
+    }
+    return 0;
+  }
+
   function namesOnlySubject(required: number): boolean {
     return subjects.some((_, subject) => (subjectMask(subject) & lowHalf & required) === required);
+  }
+
+  function namesOtherSubject(): boolean {
+    return subjects.some(({ slug }, subject) => slug !== options.bench && (subjectMask(subject) >>> exactShift) !== 0);
   }
 
   function holdersNamed(wanted: number): readonly number[] {
@@ -101,6 +133,7 @@ export function createScan(index: LinesIndex, terms: readonly QueryTerm[], found
 
   function run(wanted: number, required: number): Scanned {
     const best = createBestLines(options.limit);
+    const setBack = createBestLines(Math.ceil(options.limit / 3));
     let count = 0;
     let inLine = false;
     for (let at = 0; at < holders.length; at += 1) {
@@ -111,23 +144,22 @@ export function createScan(index: LinesIndex, terms: readonly QueryTerm[], found
       const ofSubject = subjectMask(subject);
       const ofPage = masks[offsets.pages + holder.page] ?? 0;
       const ofHolder = masks[offsets.holders + at] ?? 0;
-      const ofZone = masks[offsets.zones + at] ?? 0;
       const isConnector = holder.kind === 'connector';
       const around = ofSubject | ofPage | ofHolder;
       const ofConnectors = connectorTerms?.[subject] ?? 0;
+      // With a colour or cavity, a zone's name stands for a connector only where the donor has none of that name.
+      const ofZone = (masks[offsets.zones + at] ?? 0) & ~ofConnectors;
       const onBench = options.bench !== null && subjects[subject]?.slug === options.bench;
       let elsewhere = 0;
       for (const { bit, id, subjects: with_ } of addressed) if (id !== holder.id && with_.has(subject)) elsewhere |= bit;
       for (let line = holder.start; line < holder.end; line += 1) {
         const text = texts.places[line] ?? 0;
         const ofText = masks[offsets.texts + text] ?? 0;
-        const ofDetail = masks[offsets.details + (details.places[line] ?? 0)] ?? 0;
+        const ofDetail = (masks[offsets.details + (details.places[line] ?? 0)] ?? 0) & ~bareNumbers;
         const ownPlace = own[line] ?? 0;
         const ofOwn = isConnector ? 0 : (masks[offsets.names + ownPlace] ?? 0);
         const ofWire = (colours[colour[line] ?? 0] ?? 0) | (sizeMasks[sizes.places[line] ?? 0] ?? 0);
-        let ofEnds = 0;
-        const endsEnd = endStart[line + 1] ?? 0;
-        for (let end = endStart[line] ?? 0; end < endsEnd; end += 1) ofEnds |= masks[offsets.ends + (endIds.places[end] ?? 0)] ?? 0;
+        let ofEnds = idsOfEnds(line);
         let ofCavity = 0;
         let has = around | ofZone | ofText | ofDetail | ofOwn | ofWire | ofEnds;
         if (required === 0) {
@@ -137,23 +169,26 @@ export function createScan(index: LinesIndex, terms: readonly QueryTerm[], found
           // A cavity counts only with words that name its own connector: `headlight 9` is no ninth cavity of another one
           // that leads to the headlight. Where the subject has no connector of that name, the circuit's will do.
           ofCavity = isConnector ? (cavities[ownPlace] ?? 0) & ~elsewhere : 0;
-          has = around | ofWire | ofCavity | ((ofText | ofDetail | ofOwn | ofZone) & ~ofConnectors);
+          has = around | ofWire | ofCavity | ofZone | ((ofText | ofDetail | ofOwn) & ~ofConnectors);
           if ((has & required) !== required) {
-            if (addressed.length === 0) continue;
-            const leads = leadsTo(index, addressed, line, holder, ownPlace);
-            has = around | ofWire | ofText | ofDetail | ofOwn | ofEnds | leads;
             ofCavity = 0;
-            if (leads === 0 || (has & required) !== required) continue;
+            ofEnds = addressed.length > 0 ? leadsTo(index, addressed, line, holder, ownPlace) : 0;
+            if (ofEnds !== 0) has = around | ofWire | ofText | ofDetail | ofOwn | ofEnds | idsOfEnds(line);
+            if (ofEnds === 0 || (has & required) !== required) {
+              // Or by a terminal that it leads to, which counts only with words that name that same end.
+              ofEnds = endThatHas(line, required & ~(ofSubject | ofPage | ofWire));
+              if (ofEnds === 0) continue;
+            }
           }
         }
         count += 1;
         if (((ofText | ofOwn | ofHolder | ofWire | ofCavity) & wanted & ~ofSubject) !== 0) inLine = true;
         const appliesHere = applies[index.applies[line] ?? 0] ?? holds;
         const group =
-          (appliesHere.applies ? groups.applies : 0) +
           (onBench ? groups.bench : 0) +
           (required === 0 ? bitCount(has & wanted) * groups.term : 0);
-        if (group + mostScore < best.least()) continue;
+        const among = appliesHere.applies ? best : setBack;
+        if (group + mostScore < among.least()) continue;
         let rest = wanted;
         let score = kindWeights[holder.kind];
         const weigh = (mask: number, weight: number): void => {
@@ -173,14 +208,17 @@ export function createScan(index: LinesIndex, terms: readonly QueryTerm[], found
         weigh(ofPage, weights.page);
         score += 2 * wholeness(ofText, units[offsets.texts + text]) + wholeness(ofHolder, units[offsets.holders + at]);
         if (page?.kind === 'safe-mods') score += safeModification;
+        if (((against[offsets.texts + text] ?? 0) & ~ofText & wanted) !== 0) score += otherSide;
         if (states[line] === blankState && ofCavity === 0) score += emptyCavity;
-        best.offer({ line, holder: at, applies: appliesHere, onBench, score: group + score });
+        among.offer({ line, holder: at, applies: appliesHere, onBench, score: group + score });
       }
     }
-    return { lines: best.lines, count, inLine };
+    // Lines that the bike rules out come last, and room is kept for them: they may be the very wire that is in somebody's hand.
+    const holding = best.lines.slice(0, options.limit - setBack.lines.length);
+    return { lines: [...holding, ...setBack.lines], count, inLine };
   }
 
-  return { namesOnlySubject, holdersNamed, run };
+  return { namesOnlySubject, namesOtherSubject, holdersNamed, run };
 }
 
 /** For each subject, the terms that name one of its connectors. */

@@ -104,7 +104,7 @@ function linesIn(
       return block.lines.map((line) => ({
         ...plainLine,
         own: line.cavity + '+'.repeat(line.further),
-        text: line.blank ? '' : (line.circuit ?? ''),
+        text: line.blank ? '' : (line.circuit ?? line.note ?? ''),
         colour: colourOf(line.wire),
         size: line.size?.written ?? null,
         goesTo: line.goesTo,
@@ -132,7 +132,7 @@ function linesIn(
       return block.lines.map((line) => ({
         ...plainLine,
         own: '',
-        text: line.circuit ?? '',
+        text: line.circuit ?? line.note ?? '',
         detail: line.lengthMetres === null ? '' : `${line.lengthMetres} m`,
         colour: colourOf(line.wire),
         size: line.size?.written ?? null,

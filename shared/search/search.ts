@@ -67,6 +67,7 @@ function order(
   lines: LinesAnswer,
   prose: ProseAnswer,
 ): SearchHit[] {
+  if (lines.namesSubject === 'only') return [...pageHits, ...sectionHits];
   if (linesFirst) return [...lineHits, ...sectionHits, ...pageHits];
   // Lines that have only some of the words stand behind prose that has all of them.
   if (lines.someWordsOnly && prose.someWordsOnly) return [...sectionHits, ...lineHits, ...pageHits];

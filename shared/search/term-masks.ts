@@ -11,8 +11,12 @@ import { lettersOf, wordsBeginning } from './vocabulary.ts';
 export interface TermMasks {
   /** Texts of the vocabulary, in its one row. */
   readonly texts: Int32Array;
+  /** Texts that say the other side of what a term says: right for left, rear for front. */
+  readonly against: Int32Array;
   /** Cavities' names, by their place among the names. */
   readonly cavities: Int32Array;
+  /** Terminals that lines lead to, by their place among those of the ends. */
+  readonly terminals: Int32Array;
   readonly colours: Int32Array;
   readonly sizes: Int32Array;
   /** What was made of the words: a slip mended, a word that nothing says. */
@@ -27,7 +31,9 @@ export const exactShift = 15;
 /** Finds what each term of a query can mean in an index. */
 export function maskTerms(index: LinesIndex, terms: readonly QueryTerm[]): TermMasks {
   const texts = new Int32Array(index.vocabulary.count);
+  const against = new Int32Array(index.vocabulary.count);
   const cavities = new Int32Array(index.names.length);
+  const terminals = new Int32Array(index.endTerminals.values.length);
   const colours = new Int32Array(index.colours.length);
   const sizes = new Int32Array(index.sizes.values.length);
   const mended: { written: string; word: string }[] = [];
@@ -41,6 +47,10 @@ export function maskTerms(index: LinesIndex, terms: readonly QueryTerm[]): TermM
       answered ||= found;
       return found;
     };
+    const markPlaces = (name: string): boolean => {
+      const inCavities = markCavities(index, cavities, name, exact);
+      return markTerminals(index, terminals, name, exact) || inCavities;
+    };
     switch (term.kind) {
       case 'colour':
         answered = markColours(index, colours, term.colours, any, exact);
@@ -50,10 +60,10 @@ export function maskTerms(index: LinesIndex, terms: readonly QueryTerm[]): TermM
         }
         break;
       case 'cavity':
-        answered = markCavities(index, cavities, term.name, exact);
+        answered = markPlaces(term.name);
         break;
       case 'number': {
-        answered = markCavities(index, cavities, term.name, exact);
+        if (term.rating !== 'surely') answered = markPlaces(term.name);
         mark(term.words, true);
         if (/^\d+\.\d+$/.test(term.name)) answered = markSizes(index, sizes, Number(term.name), exact) || answered;
         if (term.last && /^[a-z]{2}/.test(term.name)) mark(wordsBeginning(index.vocabulary, term.name), false);
@@ -65,6 +75,7 @@ export function maskTerms(index: LinesIndex, terms: readonly QueryTerm[]): TermM
       case 'word': {
         const { single } = term;
         mark(term.words, true);
+        markWords(index, against, oppositesOf(term.words), any, any);
         if (single !== null && term.last && single.length >= 2) mark(wordsBeginning(index.vocabulary, single), false);
         if (answered || single === null) break;
         for (const word of wordsLike(index, single)) {
@@ -77,7 +88,18 @@ export function maskTerms(index: LinesIndex, terms: readonly QueryTerm[]): TermM
     }
     if (!answered) unanswered.add(number);
   });
-  return { texts, cavities, colours, sizes, mended, unanswered };
+  return { texts, against, cavities, terminals, colours, sizes, mended, unanswered };
+}
+
+const opposites: ReadonlyMap<string, string> = new Map([
+  ['~left', '~right'],
+  ['~right', '~left'],
+  ['~front', '~rear'],
+  ['~rear', '~front'],
+]);
+
+function oppositesOf(words: readonly string[]): readonly string[] {
+  return words.map((word) => opposites.get(word)).filter((word) => word !== undefined);
 }
 
 function markWords({ vocabulary }: LinesIndex, texts: Int32Array, words: readonly string[], weak: number, strong: number): boolean {
@@ -123,6 +145,16 @@ function markCavities({ cavities }: LinesIndex, masks: Int32Array, wanted: strin
   const places = cavities.get(wanted) ?? [];
   for (const place of places) masks[place] = (masks[place] ?? 0) | bits;
   return places.length > 0;
+}
+
+function markTerminals({ endTerminals }: LinesIndex, masks: Int32Array, wanted: string, bits: number): boolean {
+  let found = false;
+  endTerminals.values.forEach((terminal, place) => {
+    if (terminal.toLowerCase() !== wanted) return;
+    masks[place] = (masks[place] ?? 0) | bits;
+    found = true;
+  });
+  return found;
 }
 
 function markColours({ colours }: LinesIndex, masks: Int32Array, wanted: readonly ColourWanted[], any: number, exact: number): boolean {

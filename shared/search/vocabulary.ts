@@ -54,9 +54,11 @@ export function createVocabulary(texts: VocabularyTexts): Vocabulary {
       read.set(text, words);
     }
     units[number] = Math.min(255, words.units);
-    const strong = new Set(words.strong);
+    // A subject is called by its own name: `Reg-35` is not every regulator.
+    const isName = number >= offsets.subjects && number < offsets.subjects + texts.subjects.length;
+    const strong = new Set(words.strong.filter((word) => !isName || !word.startsWith('~')));
     for (const word of strong) add(postings, word, number * 2 + 1);
-    for (const word of new Set(words.weak)) if (!strong.has(word)) add(postings, word, number * 2);
+    for (const word of new Set(words.weak)) if (!strong.has(word) && !(isName && word.startsWith('~'))) add(postings, word, number * 2);
   });
   const words = [...postings.keys()].filter((word) => !word.startsWith('~')).sort();
   return { offsets, count: all.length, units, postings, words, letters: Int32Array.from(words, lettersOf) };

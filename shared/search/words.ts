@@ -40,21 +40,26 @@ export interface FindableWords {
 
 /**
  * Reads what a text can be found by: plain words; what the trade calls by several names as one concept; compounds joined
- * (`tell-tale` is `telltale` too, `Y/R` is `yr`); a name of letters and digits taken apart (`qf550` is `qf` and `550`).
+ * (`tell-tale` is `telltale` too, `Y/R` is `yr`, `15 A` is `15a`); a name of letters and digits taken apart (`qf550` is
+ * `qf` and `550`).
  */
 export function findableWords(text: string): FindableWords {
   const weak: string[] = [];
   const words: string[] = [];
   for (const [run] of plainText(text).matchAll(runPattern)) {
-    const parts = run.split(/[-/.+']/).map(singular);
+    // The halves of a decimal are no numbers of their own.
+    const parts = /^\d+\.\d+$/.test(run) ? [run] : run.split(/[-/.+']/).map(singular);
     words.push(...parts);
-    if (/^\d+\.\d+$/.test(run)) weak.push(run);
-    else if (parts.length > 1 && parts.length < 4) weak.push(parts.join(''));
+    if (parts.length > 1 && parts.length < 4) weak.push(parts.join(''));
     for (const part of parts) {
       const name = namePattern.exec(part);
       if (name?.[1] !== undefined && name[2] !== undefined) weak.push(name[1], name[2]);
     }
   }
+  words.forEach((word, at) => {
+    const unit = words[at + 1] ?? '';
+    if (/^[\d.]+$/.test(word) && /^(?:a|v|w|ah)$/.test(unit)) weak.push(word + unit);
+  });
   const strong: string[] = [];
   let units = words.length;
   let at = 0;
