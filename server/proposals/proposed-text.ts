@@ -41,8 +41,8 @@ function unread(markdown: string, refusal: ParseRefusal): ProposedText {
 }
 
 /**
- * Reads proposed texts, each once for as long as its subject stays as it is: what other pages of the subject say is part
- * of what is found.
+ * Reads proposed texts, each once for as long as the subject's other pages say the same of themselves: that is part of
+ * what is found.
  */
 export function createProposedTexts(publication: PagePublication, parsePool: ParsePool): ProposedTexts {
   const kept = createRecent<string, ProposedText>(textsKept);
