@@ -26,7 +26,9 @@ function scriptsLast(): Plugin {
       order: 'post',
       handler(html) {
         const found = (html.match(scripts) ?? []).map((tag) => tag.trim().replace(' ', ' fetchpriority="low" '));
-        return html.replace(scripts, '').replace('</body>', () => `${found.map((tag) => `  ${tag}\n  `).join('')}</body>`);
+        return html
+          .replace(scripts, '')
+          .replace('</body>', () => `${found.map((tag) => `  ${tag}\n  `).join('')}</body>`);
       },
     },
   };
