@@ -79,9 +79,9 @@ function* readFiles(folder: string): Generator<[string, StaticFile]> {
     if (!entry.isFile()) continue;
     const path = join(entry.parentPath, entry.name);
     const contentType = contentTypes[extname(entry.name)];
-    // The template, the build's manifest and compressed forms are no addresses of their own.
-    if (contentType === undefined || entry.name === 'manifest.json') continue;
     const address = `/${relative(folder, path).split(sep).join('/')}`;
+    // The template, compressed forms and what the build keeps for itself (`.vite`) are no addresses of their own.
+    if (contentType === undefined || address.startsWith('/.')) continue;
     const identity = readFileSync(path);
     const brotli = existsSync(`${path}.br`) ? readFileSync(`${path}.br`) : null;
     const gzip = existsSync(`${path}.gz`) ? readFileSync(`${path}.gz`) : null;
