@@ -1,3 +1,5 @@
+import type { QueryClient } from '@tanstack/react-query';
+import type { ReactElement } from 'react';
 import { renderToString } from 'react-dom/server';
 import {
   createStaticHandler,
@@ -49,8 +51,15 @@ export type Rendered =
 
 const handler = createStaticHandler(routes);
 
-/** Answers a request for a page or a form's post with the sheet that belongs to it. */
-export async function render(request: Request, options: RenderOptions): Promise<Rendered> {
+/** A sheet with everything loaded: nothing is left but to make markup of its element. */
+interface LoadedSheet {
+  readonly context: StaticHandlerContext;
+  readonly queryClient: QueryClient;
+  readonly element: ReactElement;
+}
+
+/** Loads what a request's sheet shows. Exported for the bench, which measures the markup alone beside `render`. */
+export async function loadSheet(request: Request, options: RenderOptions): Promise<Response | LoadedSheet> {
   const queryClient = createQueryClient();
   const bench = { donor: options.bench, variant: options.variant };
   const requestContext = new RouterContextProvider();
@@ -59,19 +68,28 @@ export async function render(request: Request, options: RenderOptions): Promise<
   requestContext.set(benchContext, bench);
 
   const context = await handler.query(request, { requestContext });
-  if (context instanceof Response) return { kind: 'response', response: context };
+  if (context instanceof Response) return context;
+  const element = (
+    <Providers api={options.api} queryClient={queryClient}>
+      <StaticRouterProvider
+        router={createStaticRouter(handler.dataRoutes, context)}
+        context={context}
+        hydrate={false}
+      />
+    </Providers>
+  );
+  return { context, queryClient, element };
+}
+
+/** Answers a request for a page or a form's post with the sheet that belongs to it. */
+export async function render(request: Request, options: RenderOptions): Promise<Rendered> {
+  const loaded = await loadSheet(request, options);
+  if (loaded instanceof Response) return { kind: 'response', response: loaded };
+  const { context, queryClient, element } = loaded;
   for (const error of surprises(context)) options.onError?.(error);
 
   try {
-    const markup = renderToString(
-      <Providers api={options.api} queryClient={queryClient}>
-        <StaticRouterProvider
-          router={createStaticRouter(handler.dataRoutes, context)}
-          context={context}
-          hydrate={false}
-        />
-      </Providers>,
-    );
+    const markup = renderToString(element);
     const { head, body } = splitHead(markup);
     const { loaderData, actionData, errors } = context;
     const state = writePageState({ loaderData, actionData, errors }, queryClient, body);
