@@ -62,9 +62,7 @@ function Row({ proposal, memberId, withAuthor }: RowProps): ReactElement {
         </p>
       </th>
       <td>{proposal.summary}</td>
-      {withAuthor ? (
-        <td data-label="By">{proposal.author.id === memberId ? 'you' : proposal.author.name}</td>
-      ) : null}
+      {withAuthor ? <td data-label="By">{proposal.author.id === memberId ? 'you' : proposal.author.name}</td> : null}
       <td>
         {stateLabels[proposal.state]}
         {remarksOn(proposal).map((remark) => (

@@ -35,7 +35,8 @@ type Stepping = Pick<ProposalSummary, 'id' | 'state' | 'author' | 'fallenBehind'
 export function nextStep(proposal: Stepping, memberId: string): NextStep {
   const { id, state, fallenBehind } = proposal;
   const sheet = paths.proposal(id);
-  if (proposal.author.id !== memberId) return { verb: state === 'waiting' ? 'Decide on it' : 'Look at it', path: sheet };
+  if (proposal.author.id !== memberId)
+    return { verb: state === 'waiting' ? 'Decide on it' : 'Look at it', path: sheet };
   if (state === 'draft') return { verb: 'Go on writing', path: paths.revise(id) };
   if (state === 'sent-back') return { verb: 'Answer it', path: paths.revise(id) };
   if (state === 'waiting' && fallenBehind) return { verb: 'Bring it up to date', path: sheet };

@@ -3,6 +3,7 @@ import {
   type InputHTMLAttributes,
   type ReactElement,
   type ReactNode,
+  type RefAttributes,
   type SelectHTMLAttributes,
   type TextareaHTMLAttributes,
 } from 'react';
@@ -62,7 +63,7 @@ export function TextField({
   problem,
   className,
   ...rest
-}: FieldText & InputHTMLAttributes<HTMLInputElement>): ReactElement {
+}: FieldText & InputHTMLAttributes<HTMLInputElement> & RefAttributes<HTMLInputElement>): ReactElement {
   const { described, frame } = useField({ label, hint, ...(problem === undefined ? {} : { problem }) }, className);
   return frame(<input type="text" className="field-control" {...rest} {...described} />);
 }
@@ -74,7 +75,7 @@ export function TextArea({
   problem,
   className,
   ...rest
-}: FieldText & TextareaHTMLAttributes<HTMLTextAreaElement>): ReactElement {
+}: FieldText & TextareaHTMLAttributes<HTMLTextAreaElement> & RefAttributes<HTMLTextAreaElement>): ReactElement {
   const { described, frame } = useField({ label, hint, ...(problem === undefined ? {} : { problem }) }, className);
   return frame(<textarea className="field-control" {...rest} {...described} />);
 }
