@@ -51,7 +51,10 @@ export function createHttpApi(fetcher: typeof fetch = fetch): Api {
 
     preview: (body) => call('POST', '/preview', body),
     start: ({ shelf, subject, page, revision, kind = null }) =>
-      call('GET', `/start${query({ shelf, subject, page, revision: revision === null ? null : String(revision), kind })}`),
+      call(
+        'GET',
+        `/start${query({ shelf, subject, page, revision: revision === null ? null : String(revision), kind })}`,
+      ),
     proposals: (state, mine) => call('GET', `/proposals${query({ state, mine: mine ? 'true' : null })}`),
     proposal: (id) => call('GET', proposalPath(id)),
     propose: (body) => call('POST', '/proposals', body),

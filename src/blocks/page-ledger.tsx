@@ -23,7 +23,7 @@ export function PageLedger({
   variant = anyVariant,
 }: PageLedgerProps): ReactElement {
   return (
-    <table className="ledger">
+    <table className="ledger ledger-close">
       <caption className="heard">{caption}</caption>
       <thead>
         <tr>
@@ -46,8 +46,7 @@ export function PageLedger({
             <td>{contentsOf(page)}</td>
             <td>
               Revision {page.revision}, {dayOf(page.publishedAt)}
-              <br />
-              <span className="soft">drawn by {page.author.name}</span>
+              <span className="ledger-by">drawn by {page.author.name}</span>
             </td>
           </tr>
         ))}

@@ -25,16 +25,18 @@ export function TitleBlock({ address, view, old = false }: TitleBlockProps): Rea
         <Field name="Title" className="title-block-name">
           {view.title}
         </Field>
-        <Field name={subjectLabels[address.shelf]}>{view.subjectTitle}</Field>
+        <Field name={subjectLabels[address.shelf]} className="title-block-subject">
+          {view.subjectTitle}
+        </Field>
+        <Field name="Page">{pageKindLabels[view.kind]}</Field>
         <Field name="Holds for">{view.applies ?? 'All years and markets'}</Field>
+        <Field name="Drawn by">{view.author.name}</Field>
+        <Field name="Signed off by">{view.publishedBy?.name ?? 'Came with the book'}</Field>
         <Field name="Revision">
           {view.revision}
           {view.revision === view.newestRevision ? '' : ` of ${String(view.newestRevision)}`}
         </Field>
         <Field name="Issued">{dayOf(view.publishedAt)}</Field>
-        <Field name="Page">{pageKindLabels[view.kind]}</Field>
-        <Field name="Drawn by">{view.author.name}</Field>
-        <Field name="Signed off by">{view.publishedBy?.name ?? 'Came with the book'}</Field>
         <Field name="Sources" className="title-block-wide">
           {view.sources.length === 0 ? (
             'None named yet. If you know where this comes from, propose it.'

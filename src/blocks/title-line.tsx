@@ -10,10 +10,12 @@ import { shelfLabels } from './words.ts';
 interface TitleLineProps {
   readonly address: PageAddress;
   readonly view: PageView;
+  /** True where an old revision is shown: what to do is to open the newest. */
+  readonly old?: boolean;
 }
 
 /** The title block as one line at the head of a page: what, of what, for which, which revision, who signed it off. */
-export function TitleLine({ address, view }: TitleLineProps): ReactElement {
+export function TitleLine({ address, view, old = false }: TitleLineProps): ReactElement {
   const isOverview = address.page === 'overview';
   return (
     <nav className="title-line" aria-label="What this page is and where it belongs">
@@ -31,7 +33,11 @@ export function TitleLine({ address, view }: TitleLineProps): ReactElement {
       </span>
       {view.publishedBy === null ? null : <span>Signed off by {view.publishedBy.name}</span>}
       <span className="title-line-last unprinted">
-        <Link to={paths.propose(address)}>Propose a change</Link>
+        {old ? (
+          <Link to={paths.page(address)}>Open the newest</Link>
+        ) : (
+          <Link to={paths.propose(address)}>Propose a change</Link>
+        )}
       </span>
     </nav>
   );

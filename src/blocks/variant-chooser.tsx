@@ -14,54 +14,57 @@ interface VariantChooserProps {
   readonly choices: VariantChoices;
   /** The path of the sheet that it stands on, without a query: where choosing leads back to. */
   readonly path: string;
+  /** True where choosing is what the sheet is for. */
+  readonly open?: boolean;
 }
 
 /**
  * Which bike of a donor is on the bench: its year, market and frame. Choosing keeps it in the address and on the bench;
  * a part or a topic is only shown for it.
  */
-export function VariantChooser({ subject, variant, choices, path }: VariantChooserProps): ReactElement | null {
+export function VariantChooser({
+  subject,
+  variant,
+  choices,
+  path,
+  open = false,
+}: VariantChooserProps): ReactElement | null {
   if (choices.years === null && choices.markets.length === 0 && choices.frames.length === 0) return null;
   const isDonor = subject.shelf === 'donors';
   const words = variantWords(variant);
   return (
-    <Form
-      className="variant-chooser plate"
-      method={isDonor ? 'post' : 'get'}
-      action={isDonor ? paths.bench : path}
-      preventScrollReset
-    >
-      <p className="variant-chooser-title" id="variant-chooser">
-        {words === null ? 'Which one is yours?' : `Shown for ${words}`}
-      </p>
-      {isDonor ? (
-        <>
-          <input type="hidden" name="donor" value={subject.subject} />
-          <input type="hidden" name="next" value={path} />
-        </>
-      ) : null}
-      {/* Keyed by what is shown, so that a choice made elsewhere arrives in the fields too. */}
-      <div className="variant-chooser-fields" key={words ?? ''}>
-        {choices.years === null ? null : (
-          <SelectField label="Year" name="year" defaultValue={variant.year ?? ''}>
-            <option value="">any</option>
-            {yearsOf(choices.years).map((year) => (
-              <option key={year}>{year}</option>
-            ))}
-          </SelectField>
-        )}
-        <NameField label="Market" name="market" names={choices.markets} chosen={variant.market} />
-        <NameField label="Frame" name="frame" names={choices.frames} chosen={variant.frame} />
-      </div>
-      <p className="button-row">
-        <Button>{isDonor ? 'Put it on the bench' : 'Show it for this one'}</Button>
-        {isAnyVariant(variant) ? null : (
-          <Link to={`${path}?year=`} className="button-beside">
-            Show every year
-          </Link>
-        )}
-      </p>
-    </Form>
+    <details className="variant-chooser plate" open={open}>
+      <summary>{words === null ? 'Which one is yours?' : `Shown for ${words}`}</summary>
+      <Form method={isDonor ? 'post' : 'get'} action={isDonor ? paths.bench : path} preventScrollReset>
+        {isDonor ? (
+          <>
+            <input type="hidden" name="donor" value={subject.subject} />
+            <input type="hidden" name="next" value={path} />
+          </>
+        ) : null}
+        {/* Keyed by what is shown, so that a choice made elsewhere arrives in the fields too. */}
+        <div className="variant-chooser-fields" key={words ?? ''}>
+          {choices.years === null ? null : (
+            <SelectField label="Year" name="year" defaultValue={variant.year ?? ''}>
+              <option value="">any</option>
+              {yearsOf(choices.years).map((year) => (
+                <option key={year}>{year}</option>
+              ))}
+            </SelectField>
+          )}
+          <NameField label="Market" name="market" names={choices.markets} chosen={variant.market} />
+          <NameField label="Frame" name="frame" names={choices.frames} chosen={variant.frame} />
+        </div>
+        <p className="button-row">
+          <Button>{isDonor ? 'Put it on the bench' : 'Show it for this one'}</Button>
+          {isAnyVariant(variant) || path === paths.bench ? null : (
+            <Link to={`${path}?year=`} className="button-beside">
+              Show every year
+            </Link>
+          )}
+        </p>
+      </Form>
+    </details>
   );
 }
 

@@ -39,12 +39,12 @@ export function StrapSign(): ReactElement {
   );
 }
 
-/** A lens over a wire. */
+/** A lens. */
 export function FindSign(): ReactElement {
   return (
     <Sign>
       <circle cx="10" cy="10" r="6.5" />
-      <path d="M15 15l6 6M6 10h8" />
+      <path d="M15 15l6 6M10 6.5a3.5 3.5 0 0 0-3.5 3.5" />
     </Sign>
   );
 }

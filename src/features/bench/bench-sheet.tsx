@@ -55,7 +55,7 @@ function DonorOnBench({ donor, bench }: { readonly donor: string; readonly bench
           ? 'On the bench; say which one, and what does not hold for it is set back.'
           : `On the bench: ${words}`
       }
-      beside={<VariantChooser subject={subject} variant={bench.variant} choices={choices} path={paths.bench} />}
+      beside={<VariantChooser subject={subject} variant={bench.variant} choices={choices} path={paths.bench} open />}
     >
       <PageHead title={`My bike: ${summary.title} · Earthstrap`} listed={false} />
       <PlainSection id="pages" title="Its pages">

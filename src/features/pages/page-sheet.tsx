@@ -3,6 +3,7 @@ import { useLoaderData } from 'react-router';
 import type { PageView } from '../../../shared/contracts/views.ts';
 import { pagePath } from '../../../shared/pages/address.ts';
 import { pageKindLabels } from '../../../shared/pages/page-kind.ts';
+import { Noticed } from '../../blocks/noticed.tsx';
 import { Overrides } from '../../blocks/overrides.tsx';
 import { RenderedPage } from '../../blocks/rendered-page.tsx';
 import { sectionsOf } from '../../blocks/sections.ts';
@@ -37,6 +38,7 @@ export function PageSheet(): ReactElement {
       />
       <Overrides overrides={view.overrides} />
       <RenderedPage of={view.address} html={view.html} />
+      <Noticed findings={view.findings} />
       <Siblings address={address} siblings={view.siblings} subjectTitle={view.subjectTitle} variant={variant} />
     </Sheet>
   );

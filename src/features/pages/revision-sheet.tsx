@@ -22,7 +22,7 @@ export function RevisionSheet(): ReactElement {
   return (
     <Sheet
       title={view.title}
-      line={<TitleLine address={address} view={view} />}
+      line={<TitleLine address={address} view={view} old={old} />}
       lead={view.summary}
       sections={sectionsOf(view.outline)}
       foot={<TitleBlock address={address} view={view} old={old} />}

@@ -2,6 +2,7 @@ import type { ReactElement } from 'react';
 import { useLoaderData } from 'react-router';
 import type { SubjectView } from '../../../shared/contracts/views.ts';
 import type { SubjectAddress } from '../../../shared/pages/address.ts';
+import { Noticed } from '../../blocks/noticed.tsx';
 import { Overrides } from '../../blocks/overrides.tsx';
 import { PageLedger } from '../../blocks/page-ledger.tsx';
 import { RenderedPage } from '../../blocks/rendered-page.tsx';
@@ -57,6 +58,7 @@ export function SubjectSheet(): ReactElement {
       )}
       <Overrides overrides={overview.overrides} />
       <RenderedPage of={overview.address} html={overview.html} />
+      <Noticed findings={overview.findings} />
       <Section id={sectionIds.help} title="How to help">
         <HowToHelp subject={subject} view={view} />
       </Section>
