@@ -44,7 +44,13 @@ export default defineConfig(({ isSsrBuild }) => ({
   },
   worker: { format: 'es' },
   build: isSsrBuild
-    ? { target: 'node20', outDir: 'dist/server', sourcemap: true, rollupOptions: { input: serverEntries } }
+    ? {
+        target: 'node20',
+        outDir: 'dist/server',
+        sourcemap: true,
+        copyPublicDir: false,
+        rollupOptions: { input: serverEntries },
+      }
     : {
         target: 'es2022',
         outDir: 'dist/client',

@@ -45,7 +45,9 @@ function greeting(server: Server, { settings, services }: Context): string {
 /** Where the server listens, if it was left to choose its port. */
 function originOf(server: Server): string {
   const address = server.address();
-  return typeof address === 'object' && address !== null ? `http://${address.address}:${address.port}` : String(address);
+  return typeof address === 'object' && address !== null
+    ? `http://${address.address}:${address.port}`
+    : String(address);
 }
 
 /** Takes no more requests, lets those that were begun end, and closes the store. */

@@ -7,7 +7,8 @@ export function requireProgramFolder(): string {
   let folder = dirname(fileURLToPath(import.meta.url));
   while (!existsSync(join(folder, 'package.json'))) {
     const above = dirname(folder);
-    if (above === folder) throw new Error('The program does not stand in its own folder: there is no package.json above it.');
+    if (above === folder)
+      throw new Error('The program does not stand in its own folder: there is no package.json above it.');
     folder = above;
   }
   return folder;

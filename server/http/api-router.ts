@@ -115,7 +115,8 @@ const notJson = problem('bad-request', 'Only JSON is read here', 'Nothing was ch
 
 /** A body of another kind would be passed over in silence. */
 function requireJson(request: Request, response: Response, next: NextFunction): void {
-  const hasBody = request.headers['transfer-encoding'] !== undefined || Number(request.headers['content-length'] ?? 0) > 0;
+  const hasBody =
+    request.headers['transfer-encoding'] !== undefined || Number(request.headers['content-length'] ?? 0) > 0;
   if (hasBody && !request.is('json')) sendProblem(response, notJson);
   else next();
 }

@@ -6,7 +6,10 @@ import type { Settings } from '../config/settings.ts';
 
 /** The server's log: lines of JSON on the standard output, never a cookie or a password. */
 export function createLogger({ logLevel }: Pick<Settings, 'logLevel'>): Logger {
-  return pino({ level: logLevel, redact: ['req.headers.cookie', 'req.headers.authorization', 'res.headers["set-cookie"]'] });
+  return pino({
+    level: logLevel,
+    redact: ['req.headers.cookie', 'req.headers.authorization', 'res.headers["set-cookie"]'],
+  });
 }
 
 /** Gives each request an id, in the log and as `X-Request-Id`, so that a report can be found. */

@@ -18,10 +18,18 @@ export function describeApi(routes: readonly Route[]): Json {
   const schemas = { ...namedSchemas(views, 'output'), ...namedSchemas(bodies, 'input'), Problem: problemSchema };
   const paths: Record<string, Record<string, Json>> = {
     '/healthz': {
-      get: { operationId: 'health', summary: 'Whether the server and its store answer', responses: { 200: plain, 503: plain } },
+      get: {
+        operationId: 'health',
+        summary: 'Whether the server and its store answer',
+        responses: { 200: plain, 503: plain },
+      },
     },
     '/api/openapi.json': {
-      get: { operationId: 'description', summary: 'This document', responses: { 200: json('OpenAPI 3.1', { type: 'object' }) } },
+      get: {
+        operationId: 'description',
+        summary: 'This document',
+        responses: { 200: json('OpenAPI 3.1', { type: 'object' }) },
+      },
     },
   };
   for (const route of routes) paths[route.path] = { ...paths[route.path], [route.method]: operation(route) };
@@ -60,7 +68,9 @@ function operation(route: Route): Json {
     ],
     ...(route.body === null
       ? {}
-      : { requestBody: { required: true, content: { 'application/json': { schema: referenceTo(bodies, route.body) } } } }),
+      : {
+          requestBody: { required: true, content: { 'application/json': { schema: referenceTo(bodies, route.body) } } },
+        }),
     responses: responsesOf(route),
   };
 }
@@ -75,8 +85,7 @@ const ifMatch = {
 
 function responsesOf(route: Route): Json {
   const responses: Record<string, Json> = {
-    [route.status]:
-      route.view === null ? { description: 'Done' } : json(route.summary, referenceTo(views, route.view)),
+    [route.status]: route.view === null ? { description: 'Done' } : json(route.summary, referenceTo(views, route.view)),
   };
   if (route.method === 'get') responses['304'] = { description: 'As it was read (`If-None-Match`)' };
   const own = route.method === 'get' ? route.problems : [...route.problems, ...everyWrite];
@@ -114,9 +123,12 @@ function namedSchemas(contracts: Contracts, io: 'input' | 'output'): Json {
     if (schema instanceof z.ZodType) registry.add(schema, { id: nameOf(exported) });
   }
   const made = z.toJSONSchema(registry, { io, unrepresentable: 'any', uri: (id) => `#/components/schemas/${id}` });
-  return Object.fromEntries(
-    Object.entries(made.schemas).map(([name, { $schema: _, $id: __, ...schema }]) => [name, schema]),
-  );
+  return Object.fromEntries(Object.entries(made.schemas).map(([name, schema]) => [name, withoutAddress(schema)]));
+}
+
+/** A schema stands in the document, so it needs no address of its own. */
+function withoutAddress(schema: object): Json {
+  return Object.fromEntries(Object.entries(schema).filter(([name]) => name !== '$schema' && name !== '$id'));
 }
 
 function referenceTo(contracts: Contracts, schema: z.ZodType): Json {

@@ -69,7 +69,11 @@ export function problemOf(error: unknown): Problem | null {
     return problem('bad-request', 'The JSON cannot be read', 'Nothing was changed. Check commas, quotes and brackets.');
   }
   if (status >= 400 && status < 500) {
-    return problem('bad-request', 'The request cannot be read', 'Nothing was changed. Send JSON in UTF-8, and a well-formed address.');
+    return problem(
+      'bad-request',
+      'The request cannot be read',
+      'Nothing was changed. Send JSON in UTF-8, and a well-formed address.',
+    );
   }
   return null;
 }

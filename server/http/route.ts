@@ -48,8 +48,10 @@ interface Input<Parameters extends z.ZodObject, Query extends z.ZodObject> {
   readonly body: unknown;
 }
 
-interface RouteDescription<Parameters extends z.ZodObject, Query extends z.ZodObject, Value>
-  extends Pick<Route, 'method' | 'path' | 'name' | 'summary'> {
+interface RouteDescription<Parameters extends z.ZodObject, Query extends z.ZodObject, Value> extends Pick<
+  Route,
+  'method' | 'path' | 'name' | 'summary'
+> {
   readonly parameters?: Parameters;
   readonly query?: Query;
   readonly body?: z.ZodType;
@@ -116,7 +118,12 @@ export function defineRoute<
 
 function unreadableQuery(error: z.ZodError): Problem {
   const fields = Object.fromEntries(error.issues.map((issue) => [issue.path.join('.'), issue.message]));
-  return problem('bad-request', 'The address asks for something that cannot be read', 'Check what stands after the ?.', {
-    fields,
-  });
+  return problem(
+    'bad-request',
+    'The address asks for something that cannot be read',
+    'Check what stands after the ?.',
+    {
+      fields,
+    },
+  );
 }

@@ -39,7 +39,12 @@ export function createPages({ site, services, signIn, baseUrl, reading, visitorP
     putProblemHeaders(response, refusal);
     const template = await site.template(request.originalUrl, response);
     const text = refusalPage(template, refusal);
-    await sendRepresentation(request, response, { status: refusal.status, contentType: html, text, cacheControl: noCache });
+    await sendRepresentation(request, response, {
+      status: refusal.status,
+      contentType: html,
+      text,
+      cacheControl: noCache,
+    });
   }
 
   async function answer(request: ExpressRequest, response: ExpressResponse): Promise<void> {
@@ -83,7 +88,11 @@ export function createPages({ site, services, signIn, baseUrl, reading, visitorP
       visitorPages.keepAndSend(key, text, generation, request, response);
       return;
     }
-    const cacheControl = !isReading(request) ? noCache : door.actor === null && reading === 'open' ? publicCache : privateCache;
+    const cacheControl = !isReading(request)
+      ? noCache
+      : door.actor === null && reading === 'open'
+        ? publicCache
+        : privateCache;
     await sendRepresentation(request, response, { status: rendered.status, contentType: html, text, cacheControl });
   }
 

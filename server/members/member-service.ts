@@ -130,7 +130,9 @@ export function createMemberService({ database, now, newId }: MemberServiceParts
       const member: Member = { id: newId(), email, name, role, suspended: false };
       const passwordHash = await hashPassword(password);
       const createdAt = new Date(now()).toISOString();
-      transact(database, (writing) => store.insert(writing, { id: member.id, email, name, role, passwordHash, createdAt }));
+      transact(database, (writing) =>
+        store.insert(writing, { id: member.id, email, name, role, passwordHash, createdAt }),
+      );
       return accept(member);
     },
   };

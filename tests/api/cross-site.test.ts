@@ -21,10 +21,15 @@ describe('behind TLS, a request that changes something', () => {
     ['by the same name without TLS is refused', { origin: 'http://book.example', host: 'book.example' }, true],
     ['from a frame without an origin is refused', { origin: 'null' }, true],
     ['typed into the address bar is refused', { 'sec-fetch-site': 'none' }, true],
-    ['that the browser calls another site’s is refused, whatever its origin', { origin: ours, 'sec-fetch-site': 'cross-site' }, true],
+    [
+      'that the browser calls another site’s is refused, whatever its origin',
+      { origin: ours, 'sec-fetch-site': 'cross-site' },
+      true,
+    ],
     ['with an origin that only begins like ours is refused', { origin: `${ours}.elsewhere.example` }, true],
   ])('%s', (_, headers, refused) => {
-    for (const method of ['POST', 'PUT', 'DELETE', 'PATCH']) expect(isCrossSite(ask(method, headers), base)).toBe(refused);
+    for (const method of ['POST', 'PUT', 'DELETE', 'PATCH'])
+      expect(isCrossSite(ask(method, headers), base)).toBe(refused);
   });
 
   test.each(['GET', 'HEAD', 'OPTIONS'])('is not what %s is', (method) => {

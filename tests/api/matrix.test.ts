@@ -61,7 +61,10 @@ const requests: Readonly<Record<string, (club: HttpClub) => Asked | Promise<Aske
     path: await step(club, '/notes'),
     init: sendJson('POST', { text: 'Which manual?' }),
   }),
-  'POST /api/proposals/{id}/send': async (club) => ({ path: await step(club, '/send', true), init: { method: 'POST' } }),
+  'POST /api/proposals/{id}/send': async (club) => ({
+    path: await step(club, '/send', true),
+    init: { method: 'POST' },
+  }),
   'POST /api/proposals/{id}/send-back': async (club) => ({
     path: await step(club, '/send-back'),
     init: sendJson('POST', { note: 'Which manual?' }),
@@ -70,8 +73,14 @@ const requests: Readonly<Record<string, (club: HttpClub) => Asked | Promise<Aske
     path: await step(club, '/decline'),
     init: sendJson('POST', { reason: 'It is not so on any bike we know.' }),
   }),
-  'POST /api/proposals/{id}/withdraw': async (club) => ({ path: await step(club, '/withdraw'), init: { method: 'POST' } }),
-  'POST /api/proposals/{id}/publish': async (club) => ({ path: await step(club, '/publish'), init: sendJson('POST', {}) }),
+  'POST /api/proposals/{id}/withdraw': async (club) => ({
+    path: await step(club, '/withdraw'),
+    init: { method: 'POST' },
+  }),
+  'POST /api/proposals/{id}/publish': async (club) => ({
+    path: await step(club, '/publish'),
+    init: sendJson('POST', {}),
+  }),
 };
 
 async function step(club: HttpClub, name: string, sentBack = false): Promise<string> {

@@ -5,7 +5,10 @@ import { apiRoutes, createApiRouter } from '../../server/http/api-router.ts';
 import { createSignIn } from '../../server/http/sign-in.ts';
 import { openHttpClub } from '../factories/http-club.ts';
 
-const response = z.object({ description: z.string().min(1), content: z.record(z.string(), z.object({ schema: z.json() })).optional() });
+const response = z.object({
+  description: z.string().min(1),
+  content: z.record(z.string(), z.object({ schema: z.json() })).optional(),
+});
 const parameter = z.strictObject({
   name: z.string(),
   in: z.enum(['path', 'query', 'header']),
@@ -17,15 +20,23 @@ const operation = z.strictObject({
   operationId: z.string(),
   summary: z.string().min(1),
   parameters: z.array(parameter).default([]),
-  requestBody: z.object({ required: z.literal(true), content: z.record(z.string(), z.object({ schema: z.json() })) }).optional(),
+  requestBody: z
+    .object({ required: z.literal(true), content: z.record(z.string(), z.object({ schema: z.json() })) })
+    .optional(),
   responses: z.record(z.string().regex(/^[2-5]\d\d$/), response),
 });
 /** What OpenAPI 3.1 asks of the parts of a document that this one uses. */
 const document = z.strictObject({
   openapi: z.literal('3.1.0'),
   info: z.object({ title: z.string(), version: z.string(), description: z.string() }),
-  paths: z.record(z.string().startsWith('/'), z.record(z.enum(['get', 'post', 'put', 'delete']).or(z.string()), operation)),
-  components: z.object({ schemas: z.record(z.string().regex(/^[\w.-]+$/), z.record(z.string(), z.json())), securitySchemes: z.json() }),
+  paths: z.record(
+    z.string().startsWith('/'),
+    z.record(z.enum(['get', 'post', 'put', 'delete']).or(z.string()), operation),
+  ),
+  components: z.object({
+    schemas: z.record(z.string().regex(/^[\w.-]+$/), z.record(z.string(), z.json())),
+    securitySchemes: z.json(),
+  }),
   security: z.json(),
 });
 
@@ -76,8 +87,14 @@ describe('the OpenAPI document', () => {
     for (const { path, described } of operationsOf(read)) {
       const inPath = [...path.matchAll(/\{(\w+)\}/g)].map(([, name]) => name);
       const named = described.parameters.filter((one) => one.in === 'path');
-      expect(named.map(({ name }) => name), path).toEqual(inPath);
-      expect(named.every(({ required }) => required), path).toBe(true);
+      expect(
+        named.map(({ name }) => name),
+        path,
+      ).toEqual(inPath);
+      expect(
+        named.every(({ required }) => required),
+        path,
+      ).toBe(true);
     }
   });
 
@@ -95,7 +112,10 @@ describe('the OpenAPI document', () => {
     const { read } = await readDocument();
     for (const { path, method, described } of operationsOf(read)) {
       const statuses = Object.keys(described.responses);
-      expect(statuses.some((status) => status.startsWith('2')), path).toBe(true);
+      expect(
+        statuses.some((status) => status.startsWith('2')),
+        path,
+      ).toBe(true);
       if (!path.startsWith('/api/') || path === '/api/openapi.json') continue;
       expect(statuses, path).toContain('500');
       if (method !== 'get') expect(statuses, path).toContain('403');

@@ -41,7 +41,13 @@ describe('settings', () => {
   });
 
   test('name every variable that cannot be read, and what to write', () => {
-    const wrong = { PORT: 'many', BASE_URL: 'ftp://book.example', READING: 'all', SEED: 'yes', SESSION_SECRET: 'short' };
+    const wrong = {
+      PORT: 'many',
+      BASE_URL: 'ftp://book.example',
+      READING: 'all',
+      SEED: 'yes',
+      SESSION_SECRET: 'short',
+    };
     expect(() => readSettings(wrong, '/club')).toThrow(
       [
         'PORT: write a number from 0 to 65535.',

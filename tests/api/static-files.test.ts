@@ -53,7 +53,9 @@ describe('a file of the site', () => {
   });
 
   test('has its security headers, answers HEAD, and needs no session', async () => {
-    const response = await (await openBuiltClub())('/assets/entry-abc123.js?v=1', {
+    const response = await (
+      await openBuiltClub()
+    )('/assets/entry-abc123.js?v=1', {
       method: 'HEAD',
       headers: { 'accept-encoding': 'identity' },
     });
@@ -63,12 +65,15 @@ describe('a file of the site', () => {
     expect(response.headers.getSetCookie()).toEqual([]);
   });
 
-  test.each(['/index.html', '/.vite/manifest.json', '/assets/entry-abc123.js.br', '/assets/../index.html', '/assets/nothing.js'])(
-    'is not what stands at %s',
-    async (path) => {
-      expect((await (await openBuiltClub())(path)).status).toBe(404);
-    },
-  );
+  test.each([
+    '/index.html',
+    '/.vite/manifest.json',
+    '/assets/entry-abc123.js.br',
+    '/assets/../index.html',
+    '/assets/nothing.js',
+  ])('is not what stands at %s', async (path) => {
+    expect((await (await openBuiltClub())(path)).status).toBe(404);
+  });
 });
 
 test('the build keeps every byte of what it compresses', () => {

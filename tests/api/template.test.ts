@@ -7,7 +7,7 @@ describe('index.html', () => {
   test('is filled as it is written, whatever a page holds', () => {
     const parts = { head: "<title>$& and $'</title>", body: '<p><!--state--> $1</p>', state: '<script>{}</script>' };
     expect(fillTemplate(template, parts)).toBe(
-      "<head><title>$& and $'</title></head><body><div id=\"root\"><p><!--state--> $1</p></div><script>{}</script></body>",
+      '<head><title>$& and $\'</title></head><body><div id="root"><p><!--state--> $1</p></div><script>{}</script></body>',
     );
   });
 

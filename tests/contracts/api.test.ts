@@ -62,7 +62,10 @@ for (const [name, open] of Object.entries(doors)) {
       const { club, visitor } = await open();
       const asker = visitor();
       const { email } = club.people.writer;
-      expect(refused(await asker().signIn({ email, password: 'a wrong one' }))).toMatchObject({ code: 'sign-in-failed', status: 401 });
+      expect(refused(await asker().signIn({ email, password: 'a wrong one' }))).toMatchObject({
+        code: 'sign-in-failed',
+        status: 401,
+      });
       const missing = refused(await asker().signIn({ email, password: '' }));
       expect(missing).toMatchObject({ code: 'fields-invalid', fields: { password: 'Write your password.' } });
     });
@@ -81,7 +84,10 @@ for (const [name, open] of Object.entries(doors)) {
       expect(accepted(await writer().changePassword({ current: testPassword, next: 'another password' }))).toBeNull();
       expect(accepted(await writer().viewer()).member?.id).toBe(club.people.writer.id);
       const wrong = refused(await writer().changePassword({ current: testPassword, next: 'another password' }));
-      expect(wrong).toMatchObject({ code: 'fields-invalid', fields: { current: expect.stringContaining('not the password') } });
+      expect(wrong).toMatchObject({
+        code: 'fields-invalid',
+        fields: { current: expect.stringContaining('not the password') },
+      });
     });
 
     test('the book is read', async () => {
@@ -134,7 +140,10 @@ for (const [name, open] of Object.entries(doors)) {
 
     test('a text is looked at before it is proposed, by anybody', async () => {
       const { visiting } = await openWithPeople();
-      const preview = holdTo(views.previewViewSchema, await visiting().preview({ markdown: pageText({ body: stoppingBlock() }) }));
+      const preview = holdTo(
+        views.previewViewSchema,
+        await visiting().preview({ markdown: pageText({ body: stoppingBlock() }) }),
+      );
       expect(preview.findings.some(({ severity }) => severity === 'stop')).toBe(true);
       expect(refused(await visiting().preview({ markdown: 'x'.repeat(70_000) })).status).toBe(422);
     });
@@ -145,20 +154,35 @@ for (const [name, open] of Object.entries(doors)) {
       expect(start.baseRevision).toBe(1);
       const id = await proposed(writer);
       expect(refused(await moderator().proposal(id)).code).toBe('not-found');
-      holdTo(views.proposalViewSchema, await writer().addVersion(id, { markdown: changed, summary: 'Said better.', baseRevision: 1 }));
+      holdTo(
+        views.proposalViewSchema,
+        await writer().addVersion(id, { markdown: changed, summary: 'Said better.', baseRevision: 1 }),
+      );
       expect(holdTo(views.proposalViewSchema, await writer().send(id)).state).toBe('waiting');
       expect(accepted(await moderator().viewer()).waiting).toBe(1);
-      const noted = holdTo(views.proposalViewSchema, await moderator().addNote(id, { text: 'Which manual?', line: 12 }));
+      const noted = holdTo(
+        views.proposalViewSchema,
+        await moderator().addNote(id, { text: 'Which manual?', line: 12 }),
+      );
       expect(noted.notes.map(({ text, line }) => [text, line])).toEqual([['Which manual?', 12]]);
-      expect(holdTo(views.proposalViewSchema, await moderator().sendBack(id, { note: 'Name it.' })).state).toBe('sent-back');
+      expect(holdTo(views.proposalViewSchema, await moderator().sendBack(id, { note: 'Name it.' })).state).toBe(
+        'sent-back',
+      );
       expect(holdTo(views.proposalViewSchema, await writer().send(id)).state).toBe('waiting');
       const published = holdTo(views.proposalViewSchema, await moderator().publish(id, {}));
-      expect([published.state, published.publishedAs, published.decidedBy?.id]).toEqual(['published', 2, club.people.moderator.id]);
+      expect([published.state, published.publishedAs, published.decidedBy?.id]).toEqual([
+        'published',
+        2,
+        club.people.moderator.id,
+      ]);
     });
 
     test('a change is declined, or taken back', async () => {
       const { writer, moderator } = await openWithPeople();
-      const declined = holdTo(views.proposalViewSchema, await moderator().decline(await sent(writer), { reason: 'No.' }));
+      const declined = holdTo(
+        views.proposalViewSchema,
+        await moderator().decline(await sent(writer), { reason: 'No.' }),
+      );
       expect(declined.state).toBe('declined');
       expect(holdTo(views.proposalViewSchema, await writer().withdraw(await sent(writer))).state).toBe('withdrawn');
     });
@@ -180,7 +204,9 @@ for (const [name, open] of Object.entries(doors)) {
       expect(refused(await visiting().start({ ...pinouts, revision: null })).code).toBe('sign-in-needed');
       expect(refused(await writer().publish(id, {})).code).toBe('not-allowed');
       expect(refused(await moderator().withdraw(id)).code).toBe('not-allowed');
-      expect(refused(await moderator().decline(id, { reason: '' })).fields).toEqual({ reason: 'Write a sentence first.' });
+      expect(refused(await moderator().decline(id, { reason: '' })).fields).toEqual({
+        reason: 'Write a sentence first.',
+      });
       expect(refused(await writer().propose({ ...change, baseRevision: null })).status).toBe(409);
       expect(refused(await moderator().publish(id, { version: 7 })).status).toBe(409);
     });

@@ -59,4 +59,3 @@ async function signedIn(asker: Asker, person: Member): Promise<Asker> {
   accepted(await asker().signIn({ email: person.email, password: testPassword }));
   return asker;
 }
-

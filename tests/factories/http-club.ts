@@ -49,14 +49,20 @@ export async function openHttpClub(options: HttpClubOptions = {}): Promise<HttpC
     moderator: addMember(database, 'Moderator', 'moderator'),
     admin: addMember(database, 'Admin', 'admin'),
   };
-  database.query.update(members).set({ passwordHash: await passwordHash }).run();
+  database.query
+    .update(members)
+    .set({ passwordHash: await passwordHash })
+    .run();
 
   const server = createServer();
   await new Promise<void>((resolve) => server.listen(0, '127.0.0.1', resolve));
   const address = server.address();
   if (address === null || typeof address === 'string') throw new Error('the server has no port');
   const origin = `http://127.0.0.1:${String(address.port)}`;
-  const settings = readSettings({ BASE_URL: origin, LOG_LEVEL: 'silent', SEED: 'none', ...options.environment }, temporaryFolder());
+  const settings = readSettings(
+    { BASE_URL: origin, LOG_LEVEL: 'silent', SEED: 'none', ...options.environment },
+    temporaryFolder(),
+  );
 
   let now = Date.UTC(2026, 0, 1, 12);
   let ids = 0;
@@ -73,11 +79,16 @@ export async function openHttpClub(options: HttpClubOptions = {}): Promise<HttpC
     [testbike.overview, overviewText()],
     [testbike.pinouts, pageText({ body: connectorBlock() })],
   ] as const) {
-    const draft = accepted(await proposals.propose(people.writer, { ...page, baseRevision: null, markdown, summary: 'Written.' }));
+    const draft = accepted(
+      await proposals.propose(people.writer, { ...page, baseRevision: null, markdown, summary: 'Written.' }),
+    );
     accepted(await proposals.send(people.writer, draft.id));
     accepted(await proposals.publish(people.moderator, draft.id, {}));
   }
-  server.on('request', createApp(context, { site: options.site ?? createPlainSite(), clientFolder: options.clientFolder ?? null }));
+  server.on(
+    'request',
+    createApp(context, { site: options.site ?? createPlainSite(), clientFolder: options.clientFolder ?? null }),
+  );
   onTestFinished(async () => {
     server.closeAllConnections();
     await new Promise((resolve) => server.close(resolve));

@@ -38,14 +38,20 @@ export function createPlainSite(): Site & { readonly rendered: string[] } {
       const [, shelf = '', subject = ''] = pathname.split('/');
       const viewer = await options.api.viewer();
       const name = viewer.ok ? (viewer.value.member?.name ?? null) : null;
-      if (!isShelf(shelf)) return page(pathname === '/' ? 200 : 404, `<p>Hello ${name ?? 'visitor'}</p>`, pathname === '/' && name === null);
+      if (!isShelf(shelf))
+        return page(
+          pathname === '/' ? 200 : 404,
+          `<p>Hello ${name ?? 'visitor'}</p>`,
+          pathname === '/' && name === null,
+        );
       const found = await options.api.subject({ shelf, subject });
       if (!found.ok) return page(found.refusal.status, `<p>${found.refusal.title}</p>`);
       const bench = `${options.bench ?? 'nothing'} ${String(options.variant.year ?? 'any year')}`;
       const words = `<h1>${found.value.summary.title}</h1><p>for ${name ?? 'visitor'}, bench ${bench}, asked ${search}</p>`;
       return page(200, words + '<p>Long enough to be compressed. </p>'.repeat(40), name === null);
     },
-    template: async () => '<html><head><!--head--></head><body><!--page--><!--state--><script type="module" src="/a.js"></script></body></html>',
+    template: async () =>
+      '<html><head><!--head--></head><body><!--page--><!--state--><script type="module" src="/a.js"></script></body></html>',
     middleware: null,
     nonce: null,
     close: async () => {},
