@@ -63,14 +63,26 @@ const synonyms: readonly (readonly string[])[] = [
 ];
 
 const marker = '~';
-const conceptOf = new Map<string, string>();
-let longest = 1;
+
+interface ConceptName {
+  readonly words: readonly string[];
+  readonly concept: string;
+}
+
+/** Every name by its first word, longer ones first: most words begin none, and are passed over by one look-up. */
+const namesBeginning = new Map<string, ConceptName[]>();
 for (const names of synonyms) {
   const concept = marker + (names[0] ?? '').replace(/ /g, '');
   for (const name of names) {
-    conceptOf.set(name, concept);
-    longest = Math.max(longest, name.split(' ').length);
+    const words = name.split(' ');
+    const first = words[0] ?? '';
+    namesBeginning.set(first, [...(namesBeginning.get(first) ?? []), { words, concept }]);
   }
+}
+for (const names of namesBeginning.values()) names.sort((a, b) => b.words.length - a.words.length);
+
+function standsAt(words: readonly string[], start: number, name: ConceptName): boolean {
+  return name.words.every((word, at) => words[start + at] === word);
 }
 
 /** A stretch of words that names a concept: where it stands, how many words it takes, and the concept. */
@@ -81,22 +93,13 @@ export interface ConceptFound {
   readonly concept: string;
 }
 
-function conceptAt(words: readonly string[], start: number, length: number): string | undefined {
-  return conceptOf.get(words.slice(start, start + length).join(' '));
-}
-
 /** Finds the concepts in plain words, left to right, the longest name first, none overlapping another. */
 export function findConcepts(words: readonly string[]): ConceptFound[] {
   const found: ConceptFound[] = [];
   for (let start = 0; start < words.length; ) {
-    let length = Math.min(longest, words.length - start);
-    for (; length > 0; length -= 1) {
-      const concept = conceptAt(words, start, length);
-      if (concept === undefined) continue;
-      found.push({ start, length, concept });
-      break;
-    }
-    start += Math.max(1, length);
+    const name = namesBeginning.get(words[start] ?? '')?.find((candidate) => standsAt(words, start, candidate));
+    if (name !== undefined) found.push({ start, length: name.words.length, concept: name.concept });
+    start += name?.words.length ?? 1;
   }
   return found;
 }
@@ -104,11 +107,8 @@ export function findConcepts(words: readonly string[]): ConceptFound[] {
 /** Every concept that plain words name, also those inside another's name: `dip switch` is also `dip` and `switch`. */
 export function conceptsWithin(words: readonly string[]): string[] {
   const found: string[] = [];
-  for (let start = 0; start < words.length; start += 1) {
-    for (let length = Math.min(longest, words.length - start); length > 0; length -= 1) {
-      const concept = conceptAt(words, start, length);
-      if (concept !== undefined) found.push(concept);
-    }
-  }
+  words.forEach((word, start) => {
+    for (const name of namesBeginning.get(word) ?? []) if (standsAt(words, start, name)) found.push(name.concept);
+  });
   return found;
 }

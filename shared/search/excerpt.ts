@@ -1,4 +1,5 @@
-import { findableWords, singular, plainText } from './words.ts';
+import { findConcepts } from './concepts.ts';
+import { plainText, singular } from './words.ts';
 
 const before = 60;
 const most = 190;
@@ -6,6 +7,7 @@ const most = 190;
 /**
  * The words of a text around the first of those that were looked for, at most some 190 characters, with an ellipsis
  * where it was cut. Null where the text is empty.
+ * @param looked plain words and concepts
  */
 export function excerptOf(text: string, looked: readonly string[]): string | null {
   const line = text.replace(/\s+/g, ' ').trim();
@@ -19,11 +21,14 @@ export function excerptOf(text: string, looked: readonly string[]): string | nul
 
 /** Where the first word stands that was looked for itself, or that names what was looked for; 0 where none does. */
 function placeOf(line: string, looked: ReadonlySet<string>): number {
+  const words: string[] = [];
+  const places: number[] = [];
   for (const word of line.matchAll(/[\p{L}\p{N}]+/gu)) {
-    if (looked.has(singular(plainText(word[0])))) return word.index;
+    const plain = singular(plainText(word[0]));
+    if (looked.has(plain)) return word.index;
+    words.push(plain);
+    places.push(word.index);
   }
-  for (const pair of line.matchAll(/[\p{L}\p{N}]+[ -][\p{L}\p{N}]+/gu)) {
-    if (findableWords(pair[0]).strong.some((concept) => looked.has(concept))) return pair.index;
-  }
-  return 0;
+  const named = findConcepts(words).find(({ concept }) => looked.has(concept));
+  return named === undefined ? 0 : (places[named.start] ?? 0);
 }

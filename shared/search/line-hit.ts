@@ -143,8 +143,26 @@ function hazardOf(index: LinesIndex, page: IndexedPage, prose: ProseIndex | null
   return { signal: hazard.signal, text: own ?? bookCautions[hazard.kind].text };
 }
 
+/** Faces drawn lately, by index: as a query is typed the same lines keep coming back. */
+const drawnFaces = new WeakMap<LinesIndex, Map<string, string | null>>();
+const mostDrawn = 400;
+
 /** The connector's face from the side that its page shows, with the line's cavity ringed. */
 function faceMarkup(index: LinesIndex, holder: IndexedHolder, line: number, variant: Variant): string | null {
+  if (holder.face === null) return null;
+  const drawn = drawnFaces.get(index) ?? new Map<string, string | null>();
+  drawnFaces.set(index, drawn);
+  const key = [line, variant.year, variant.market, variant.frame].join(' ');
+  let markup = drawn.get(key);
+  if (markup === undefined) {
+    markup = drawMarkup(index, holder, line, variant);
+    if (drawn.size >= mostDrawn) drawn.clear();
+    drawn.set(key, markup);
+  }
+  return markup;
+}
+
+function drawMarkup(index: LinesIndex, holder: IndexedHolder, line: number, variant: Variant): string | null {
   const connector = indexedConnector(index, holder);
   if (connector === null) return null;
   const cavity = connector.lines[line - holder.start]?.cavity ?? null;

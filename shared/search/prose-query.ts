@@ -7,9 +7,11 @@ import { plainText, singular } from './words.ts';
 /** The fuzziness that a word of five letters and more is given: one slip, two from ten letters. */
 const fuzziness = 0.2;
 const shortestPrefix = 2;
+/** Two letters begin too many words to look for all of them in every text: they are completed in headings and titles. */
+const shortestPrefixInText = 3;
 
 type Part = QueryCombination;
-type PartOptions = Pick<SearchOptions, 'prefix' | 'fuzzy'>;
+type PartOptions = Pick<SearchOptions, 'prefix' | 'fuzzy' | 'fields'>;
 
 /**
  * What of a query the prose is asked for, a part a term; null where there is nothing to ask. Cavities, sizes and short
@@ -34,9 +36,9 @@ function partOf(term: QueryTerm, known: ReadonlySet<string>): Part | null {
       const { single } = term;
       if (single === null || known.has(single)) {
         // A word that is there is not misspelt: only the last one, which may be unfinished, is taken further.
-        return anyOf(term.words, term.last && single !== null && single.length >= shortestPrefix ? { prefix: (word) => word === single } : {});
+        return term.last && single !== null ? anyOf(term.words, {}, beginningWith(single)) : anyOf(term.words, {});
       }
-      if (slipsForgiven(single) === 0) return anyOf(term.words, term.last && single.length >= shortestPrefix ? { prefix: true } : {});
+      if (slipsForgiven(single) === 0) return anyOf(term.words, {}, term.last ? beginningWith(single) : []);
       const likely = swapped(single).filter((variant) => known.has(variant));
       return anyOf([...term.words, ...likely], { prefix: term.last, fuzzy: (word) => (likely.length === 0 && word === single ? fuzziness : false) });
     }
@@ -51,6 +53,13 @@ function partOf(term: QueryTerm, known: ReadonlySet<string>): Part | null {
     case 'no-colour':
       return null;
   }
+}
+
+/** What an unfinished word may become. */
+function beginningWith(word: string): Part[] {
+  if (word.length < shortestPrefix) return [];
+  const inTitles = word.length < shortestPrefixInText ? { fields: ['heading', 'title'] } : {};
+  return [{ combineWith: 'OR', queries: [word], prefix: true, ...inTitles }];
 }
 
 function anyOf(words: readonly string[], options: PartOptions, more: readonly Part[] = []): Part {

@@ -58,8 +58,8 @@ const mostElsewhere = 3;
 const blankState = 1;
 /** Groups outweigh every score: lines of the bench, then those with more of the terms. */
 const groups = { bench: 10_000, term: 500 } as const;
-/** No line's own score reaches this. */
-const mostScore = 300;
+/** The most that a line's kind and its texts' wholeness add to what its terms are worth. */
+const mostBesides = 1 + 2 + 1;
 
 const lowHalf = (1 << exactShift) - 1;
 
@@ -136,6 +136,16 @@ export function createScan(index: LinesIndex, terms: readonly QueryTerm[], found
     const setBack = createBestLines(Math.ceil(options.limit / 3));
     let count = 0;
     let inLine = false;
+    let rest = 0;
+    let score = 0;
+    const mostScore = bitCount(wanted) * weights.wire * (1 + exactly) + mostBesides;
+    /** Counts each term once, where it is worth most. */
+    function weigh(mask: number, weight: number): void {
+      const hit = mask & rest;
+      if (hit === 0) return;
+      score += weight * (bitCount(hit) + exactly * bitCount((mask >>> exactShift) & hit));
+      rest &= ~hit;
+    }
     for (let at = 0; at < holders.length; at += 1) {
       const holder = holders[at];
       if (holder === undefined || holder.start === holder.end) continue;
@@ -188,15 +198,9 @@ export function createScan(index: LinesIndex, terms: readonly QueryTerm[], found
           (onBench ? groups.bench : 0) +
           (required === 0 ? bitCount(has & wanted) * groups.term : 0);
         const among = appliesHere.applies ? best : setBack;
-        if (group + mostScore < among.least()) continue;
-        let rest = wanted;
-        let score = kindWeights[holder.kind];
-        const weigh = (mask: number, weight: number): void => {
-          const hit = mask & rest;
-          if (hit === 0) return;
-          score += weight * (bitCount(hit) + exactly * bitCount((mask >>> exactShift) & hit));
-          rest &= ~hit;
-        };
+        if (group + mostScore <= among.least()) continue;
+        rest = wanted;
+        score = kindWeights[holder.kind];
         weigh(ofCavity | ofWire, weights.wire);
         weigh(ofHolder, weights.holder);
         weigh(ofText, weights.text);

@@ -25,7 +25,7 @@ export interface SearchOptions {
   readonly limit: number;
 }
 
-const usualLimit = 30;
+const usualLimit = 24;
 
 /**
  * Asks both indexes. Lines come first where the query names a colour, a cavity or a circuit; then sections; then pages.

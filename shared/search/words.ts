@@ -5,6 +5,8 @@ const plainLetters: Readonly<Record<string, string>> = { ø: 'o', æ: 'ae', œ: 
 
 /** Lower case without accents, so that `Sørvik` and `sorvik` are one; `mm²` becomes `mm2`. */
 export function plainText(text: string): string {
+  // Most text is plain already.
+  if (!/[^\x00-\x7f]/.test(text)) return text.toLowerCase();
   return text
     .normalize('NFKD')
     .replace(/\p{M}+/gu, '')
