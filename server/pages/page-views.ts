@@ -55,8 +55,13 @@ export function differenceView({ lines, coarse }: Difference): DifferenceView {
 }
 
 /** A page as a row of a list. */
-export function pageSummary({ digest, cited: _cited, ...row }: ListedPageRow): PageSummary {
-  return { ...row, connectors: digest.connectors.length };
+export function pageSummary(row: ListedPageRow): PageSummary {
+  const { shelf, subject, subjectTitle, page, title, kind, summary, revision, publishedAt, publishedBy, author } = row;
+  return {
+    ...{ shelf, subject, subjectTitle, page, title, kind, summary, revision, publishedAt, publishedBy, author },
+    lines: row.lines,
+    connectors: row.digest.connectors.length,
+  };
 }
 
 /** Compares pages as a subject lists them: in the order of their kinds, then by title. */

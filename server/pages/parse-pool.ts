@@ -94,7 +94,7 @@ export function createParsePool(dependencies: ParsePoolDependencies): ParsePool 
     const current = running.get(worker) ?? null;
     running.delete(worker);
     if (current?.timer) clearTimeout(current.timer);
-    if (current?.asker != null) ration.charge(current.asker, now() - current.startedAt);
+    if (current !== null && current.asker !== null) ration.charge(current.asker, now() - current.startedAt);
     return current;
   }
 

@@ -11,6 +11,7 @@ import type { Writing } from '../db/transact.ts';
 export type ProposalRow = typeof proposals.$inferSelect;
 export type DraftRow = typeof proposalDrafts.$inferSelect;
 export type VersionRow = typeof proposalVersions.$inferSelect;
+export type SentVersion = Omit<VersionRow, 'proposalId'>;
 export type NoteRow = typeof proposalNotes.$inferInsert;
 
 /** Proposals in one list. */
@@ -84,7 +85,14 @@ export function createProposalReader({ query }: Database) {
     .where(eq(proposalDrafts.proposalId, placeholder('id')))
     .prepare();
   const versions = query
-    .select()
+    .select({
+      number: proposalVersions.number,
+      markdown: proposalVersions.markdown,
+      summary: proposalVersions.summary,
+      baseRevision: proposalVersions.baseRevision,
+      createdAt: proposalVersions.createdAt,
+      sentAt: proposalVersions.sentAt,
+    })
     .from(proposalVersions)
     .where(eq(proposalVersions.proposalId, placeholder('id')))
     .orderBy(asc(proposalVersions.number))

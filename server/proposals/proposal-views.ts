@@ -23,15 +23,19 @@ function hasFallenBehind({ proposal, publishedRevision }: ListedProposalRow, bas
   return !isClosed(proposal.state) && publishedRevision !== base;
 }
 
-/** A proposal as a row of a list. */
-export function proposalSummary(row: ListedProposalRow): ProposalSummary {
-  const { proposal, author, publishedRevision, notes } = row;
-  const { id, shelf, subject, page, title, summary, state, baseRevision, versions, stops } = proposal;
-  const { createdAt, updatedAt, sentAt } = proposal;
+/** What a list and the proposal itself both say of it. */
+function commonView(row: ListedProposalRow) {
+  const { proposal, author, publishedRevision } = row;
+  const { id, shelf, subject, page, title, summary, state, baseRevision, createdAt, updatedAt, sentAt } = proposal;
   return {
     ...{ id, shelf, subject, page, title, summary, state, author, baseRevision, publishedRevision },
-    ...{ fallenBehind: hasFallenBehind(row, baseRevision), versions, notes, stops, createdAt, updatedAt, sentAt },
+    ...{ fallenBehind: hasFallenBehind(row, baseRevision), createdAt, updatedAt, sentAt },
   };
+}
+
+/** A proposal as a row of a list. */
+export function proposalSummary(row: ListedProposalRow): ProposalSummary {
+  return { ...commonView(row), versions: row.proposal.versions, notes: row.notes, stops: row.proposal.stops };
 }
 
 /** The text of a proposal that somebody sees: their own draft where there is one, the newest version sent otherwise. */
@@ -63,7 +67,7 @@ export function createProposalViews(reader: ProposalReader, publication: PagePub
   }
 
   function versionsFor(actor: Actor, row: ListedProposalRow): ProposalView['versions'] {
-    const sent = reader.versions(row.proposal.id).map(({ proposalId: _, ...version }) => version);
+    const sent = reader.versions(row.proposal.id);
     const draft = actor?.id === row.proposal.authorId ? reader.draft(row.proposal.id) : null;
     if (draft === null) return sent;
     const { markdown, summary, baseRevision, createdAt } = draft;
@@ -79,7 +83,7 @@ export function createProposalViews(reader: ProposalReader, publication: PagePub
 
     view(actor, row, current, proposed) {
       const { proposal } = row;
-      const { versions: _versions, notes: _notes, stops: _stops, ...summary } = proposalSummary(row);
+      const common = commonView(row);
       const address = addressOf(row);
       const { baseRevision, markdown } = current;
       const base = baseRevision === null ? '' : (publication.markdown(address, baseRevision) ?? '');
@@ -89,8 +93,8 @@ export function createProposalViews(reader: ProposalReader, publication: PagePub
       const allows = (action: ProposalAction): boolean => afterAction(proposal.state, action).ok;
       const changes = can(actor, 'change proposal', ownership);
       return {
-        ...summary,
-        title: proposed.text?.frontMatter.title ?? summary.title,
+        ...common,
+        title: proposed.text?.frontMatter.title ?? common.title,
         summary: current.summary,
         baseRevision,
         fallenBehind,

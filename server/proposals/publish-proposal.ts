@@ -24,7 +24,7 @@ import {
   wrongKind,
   wrongState,
 } from './proposal-problems.ts';
-import type { createProposalWriter, ListedProposalRow, ProposalReader, VersionRow } from './proposal-store.ts';
+import type { createProposalWriter, ListedProposalRow, ProposalReader, SentVersion } from './proposal-store.ts';
 import { addressOf } from './proposal-views.ts';
 import type { ProposedTexts } from './proposed-text.ts';
 
@@ -93,7 +93,7 @@ export async function publishProposal(
   if (version === undefined) throw new Error(`Proposal ${row.proposal.id} waits without a version`);
   if (body.version !== undefined && body.version !== version.number) return refuse(newerVersion(version.number));
 
-  async function decide(standing: Standing, newest: VersionRow): Promise<Result<Decision, Problem>> {
+  async function decide(standing: Standing, newest: SentVersion): Promise<Result<Decision, Problem>> {
     const place = refusalOfPlace(address, newest.baseRevision, standing);
     if (place !== null) return refuse(place);
     const proposed = await texts.read(address, newest.markdown, null);
@@ -128,7 +128,7 @@ function writePublication(
   writing: Parameters<PagePublication['publish']>[0],
   moderator: Member,
   decidedOn: ListedProposalRow,
-  version: VersionRow,
+  version: SentVersion,
   { text, overrides }: Decision,
   standing: Standing,
 ): Result<Published, Problem | 'moved'> {

@@ -26,6 +26,17 @@ describe('the open store', () => {
     expect(write).toThrow('half way');
     expect(database.sqlite.prepare('SELECT count(*) AS members FROM members').get()).toEqual({ members: 0 });
   });
+
+  it('refuses a transaction that would go on after it was committed', () => {
+    const database = openTestDatabase();
+    const write = () =>
+      transact(database, async () => {
+        addMember(database, 'Writer');
+        await Promise.resolve();
+      });
+    expect(write).toThrow('promise');
+    expect(database.sqlite.prepare('SELECT count(*) AS members FROM members').get()).toEqual({ members: 0 });
+  });
 });
 
 /** Writes one row into every immutable table. */

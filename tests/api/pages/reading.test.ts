@@ -13,7 +13,7 @@ import {
 } from '../../../shared/contracts/views.ts';
 import { anyVariant } from '../../../shared/pages/applicability.ts';
 import { accepted, openBookWithDonor, openTestBook, refused, testbike } from '../../factories/book.ts';
-import { connectorBlock, overviewText, pageText } from '../../factories/page-texts.ts';
+import { connectorBlock, pageText } from '../../factories/page-texts.ts';
 
 /** A donor with pinouts of two revisions: the second cavity's wire was corrected. */
 async function openBookWithPinouts() {
