@@ -65,9 +65,6 @@ describe('signing in', () => {
     );
     expect([wrong.status, unknown.status]).toEqual([401, 401]);
     const [saidToWrong, saidToUnknown] = [await wrong.json(), await unknown.json()];
-      await wrong.json(),
-      await unknown.json(),
-    ];
     expect({ ...saidToUnknown, instance: saidToWrong.instance }).toEqual(saidToWrong);
     expect(saidToWrong).toMatchObject({ code: 'sign-in-failed', status: 401 });
     expect(storedSessions(club)).toEqual([]);
