@@ -46,13 +46,21 @@ async function answers(origin: string, server: ChildProcess): Promise<void> {
   throw new Error('the server did not answer within a minute');
 }
 
-async function serve(dataFolder: string, settings: Record<string, string>): Promise<Club> {
+/** Opens a club on a folder of data that stays where it is. */
+export async function openClubAt(dataFolder: string, settings: Record<string, string> = {}): Promise<Club> {
   const port = await freePort();
   const origin = `http://127.0.0.1:${String(port)}`;
   const server = spawn(process.execPath, [join(root, 'dist/server/main.js')], {
     cwd: root,
     stdio: ['ignore', 'ignore', 'inherit'],
-    env: { ...process.env, PORT: String(port), BASE_URL: origin, DATA_DIR: dataFolder, LOG_LEVEL: 'error', ...settings },
+    env: {
+      ...process.env,
+      PORT: String(port),
+      BASE_URL: origin,
+      DATA_DIR: dataFolder,
+      LOG_LEVEL: 'error',
+      ...settings,
+    },
   });
   const ended = new Promise<void>((resolve) => server.once('exit', () => resolve()));
   await answers(origin, server);
@@ -73,7 +81,7 @@ export async function prepareDemoBook(): Promise<void> {
   const made = join(base, 'made-from');
   if (existsSync(made) && readFileSync(made, 'utf8') === stamp) return;
   rmSync(base, { recursive: true, force: true });
-  const club = await serve(base, { SEED: 'demo' });
+  const club = await openClubAt(base, { SEED: 'demo' });
   await club.close();
   writeFileSync(made, stamp);
 }
@@ -82,7 +90,7 @@ export async function prepareDemoBook(): Promise<void> {
 export async function openClub(settings: Record<string, string> = {}): Promise<Club> {
   const folder = mkdtempSync(join(tmpdir(), 'earthstrap-club-'));
   cpSync(base, folder, { recursive: true });
-  const club = await serve(folder, settings);
+  const club = await openClubAt(folder, settings);
   return {
     ...club,
     async close() {

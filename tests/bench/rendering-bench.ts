@@ -1,0 +1,80 @@
+import { cpSync, mkdtempSync, rmSync } from 'node:fs';
+import { tmpdir } from 'node:os';
+import { join } from 'node:path';
+import { pathToFileURL } from 'node:url';
+import { renderToString } from 'react-dom/server';
+import { readSettings } from '../../server/config/settings.ts';
+import { openContext } from '../../server/context.ts';
+import { createLocalApi, type Door } from '../../server/local-api.ts';
+import { createMemberStore } from '../../server/members/member-store.ts';
+import type { Member } from '../../shared/members/member.ts';
+import { anyVariant } from '../../shared/pages/applicability.ts';
+import { prepareDemoBook } from '../browser/club.ts';
+import type { Pace } from './pace.ts';
+import type { BenchRow } from './row.ts';
+import { milliseconds, sideBySide } from './side-by-side.ts';
+
+const pages = ['/donors/torimachi-qf550/pinouts-front', '/donors/torimachi-qf550/quirks'] as const;
+
+/** The door of somebody who only reads. */
+function readersDoor(actor: Member): Door {
+  const refuse = (): never => {
+    throw new Error('nobody signs in or out while the bench measures');
+  };
+  return { actor, address: '127.0.0.1', prove: refuse, signIn: refuse, signOut: refuse };
+}
+
+/** The site's renderer as it was built. */
+async function builtRenderer(): Promise<typeof import('../../src/entry-server.tsx')> {
+  const file = pathToFileURL(join(process.cwd(), 'dist', 'server', 'entry-server.js')).href;
+  // Built from the very file whose type is given.
+  return (await import(/* @vite-ignore */ file)) as typeof import('../../src/entry-server.tsx');
+}
+
+/**
+ * A page for a member, who gets no kept one: loading from a real store, the markup, the state for the browser; beside
+ * the markup alone of the same tree with everything loaded.
+ */
+export async function renderingRows(pace: Pace): Promise<BenchRow[]> {
+  await prepareDemoBook();
+  const folder = mkdtempSync(join(tmpdir(), 'earthstrap-bench-'));
+  cpSync(join(process.cwd(), '.cache', 'demo-book'), folder, { recursive: true });
+  const settings = readSettings({ DATA_DIR: folder, LOG_LEVEL: 'error' }, process.cwd());
+  const context = await openContext(settings, process.cwd());
+  try {
+    const { loadSheet, render } = await builtRenderer();
+    const found = createMemberStore(context.database).getByEmail('hobbyist@earthstrap.example');
+    if (found === null) throw new Error('the demo has no hobbyist');
+    const options = {
+      api: createLocalApi(context.services, readersDoor(found.member)),
+      variant: anyVariant,
+      bench: null,
+    };
+    const rows: BenchRow[] = [];
+    for (const path of pages) {
+      const request = (): Request => new Request(`http://127.0.0.1${path}`);
+      const loaded = await loadSheet(request(), options);
+      if (loaded instanceof Response) throw new Error(`${path} is no page`);
+      const once = await render(request(), options);
+      if (once.kind !== 'page' || once.status !== 200) throw new Error(`${path} was not rendered`);
+      const times = await sideBySide(
+        pace,
+        'processor',
+        () => render(request(), options),
+        () => renderToString(loaded.element),
+      );
+      rows.push({
+        what: `a page rendered for a member: ${path}`,
+        beside: 'renderToString of the same tree alone, everything loaded',
+        measured: milliseconds(times.ours),
+        yardstick: milliseconds(times.yardstick),
+        ratio: 1 / times.timeRatio,
+        budget: { kind: 'at least', ratio: 0.8 },
+      });
+    }
+    return rows;
+  } finally {
+    await context.close();
+    rmSync(folder, { recursive: true, force: true });
+  }
+}
