@@ -59,4 +59,4 @@ function caution(signal: SignalWord, body: string, more: string, className: stri
 
 /** The safety alert symbol of ANSI Z535.6, a triangle with an exclamation mark; a notice has none. */
 const alertSign =
-  '<svg class="alert-sign" viewBox="0 0 22 20" width="22" height="20" aria-hidden="true" focusable="false"><path d="M11 1.5 20.800 18.5H1.200z" fill="none" stroke="currentColor" stroke-width="2" stroke-linejoin="round"/><path d="M11 7v5.5M11 14.5v2" stroke="currentColor" stroke-width="2.2"/></svg>';
+  '<svg class="alert-sign" viewBox="0 0 22 20" width="22" height="20" aria-hidden="true" focusable="false"><path d="M11 1.5 20.8 18.5H1.200z" fill="none" stroke="currentColor" stroke-width="2" stroke-linejoin="round"/><path d="M11 7v5.5M11 14.5v2" stroke="currentColor" stroke-width="2.2"/></svg>';

@@ -20,11 +20,16 @@ export function renderConnector(block: ConnectorBlock, level: number, context: R
     openTag('section', { class: 'block connector', id, 'data-connector': block.id, 'aria-label': name }),
     heading(level, name, block.name === null ? null : block.id),
     renderFacts(block, context),
-    '<div class="face-and-lines">',
+    `<div class="face-and-lines${isWide(face) ? ' wide' : ''}">`,
     renderFace(block, face, name, id === null ? null : `turn-${id}`, context),
     renderTable(block, context, seats),
     '</div></section>',
   ].join('');
+}
+
+/** Past seven cavities in a row a face leaves no room for the table beside it. */
+function isWide({ layout }: Face): boolean {
+  return layout.kind === 'rows' && layout.rows.some((row) => row.length > 7);
 }
 
 function renderFace(block: ConnectorBlock, face: Face, title: string, turnId: string | null, context: RenderContext): string {
