@@ -34,5 +34,6 @@ async function start(root: HTMLElement, state: HTMLElement): Promise<void> {
 
 const root = document.getElementById('root');
 const state = document.getElementById('state');
-// Without a state the server had nothing to go on from: what it sent stands by itself.
-if (root !== null && state !== null) await start(root, state);
+// Without a state the server had nothing to go on from: what it sent stands by itself. Not awaited here: sheets that come
+// later import from this file's own bundle, and would wait for it while it waits for them.
+if (root !== null && state !== null) void start(root, state);
