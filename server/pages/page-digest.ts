@@ -1,10 +1,10 @@
-import type { Block, ConnectorBlock, Line } from '../../shared/blocks/block.ts';
-import { citedIds } from '../../shared/blocks/check-sources.ts';
+import type { Block, ConnectorBlock } from '../../shared/blocks/block.ts';
+import { isCited } from '../../shared/blocks/cited.ts';
 import { linesOf } from '../../shared/blocks/lines.ts';
 import type { PageText } from '../../shared/dialect/page-text.ts';
 import type { FaceLayout } from '../../shared/blocks/face-layout.ts';
 import type { Applicability } from '../../shared/pages/applicability.ts';
-import type { FrontMatter, Source } from '../../shared/pages/front-matter.ts';
+import type { FrontMatter } from '../../shared/pages/front-matter.ts';
 import { parseYears } from '../../shared/pages/years.ts';
 import type { ConnectorEntry, PageDigest, StoredDocument } from '../db/schema/derived.ts';
 
@@ -14,12 +14,6 @@ export interface CountedDigest {
   /** Lines that a factory manual or a standard says. */
   readonly cited: number;
   readonly digest: PageDigest;
-}
-
-/** True where a line, or its block, names a factory manual or a standard among its sources. */
-export function isCited(line: Line, sources: readonly Source[]): boolean {
-  const named = citedIds(line.cite);
-  return sources.some(({ id, kind }) => named.includes(id) && (kind === 'factory-manual' || kind === 'standard'));
 }
 
 function cavitiesOf(layout: FaceLayout): number {
@@ -65,7 +59,7 @@ export function digestOf({ frontMatter, blocks }: PageText): CountedDigest {
   const connectors = blocks.filter((block) => block.kind === 'connector');
   return {
     lines: lines.length,
-    cited: lines.filter((line) => isCited(line, frontMatter.sources)).length,
+    cited: lines.filter((line) => isCited(line.cite, frontMatter.sources)).length,
     digest: {
       facts: frontMatter.facts,
       connectors: connectors.map(connectorEntry),

@@ -14,7 +14,6 @@ import {
   subjects,
 } from '../db/schema/pages.ts';
 
-export type SubjectRow = typeof subjects.$inferSelect;
 export type PageRow = typeof pages.$inferSelect;
 
 /**

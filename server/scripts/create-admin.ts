@@ -1,6 +1,6 @@
 import { mkdirSync } from 'node:fs';
 import { join } from 'node:path';
-import { createInterface } from 'node:readline/promises';
+import { createInterface } from 'node:readline';
 import { Writable } from 'node:stream';
 import { parseArgs } from 'node:util';
 import { requireProgramFolder } from '../config/program-folder.ts';
@@ -16,30 +16,46 @@ import { createMemberService } from '../members/member-service.ts';
  * no argument, since everybody on the machine may read those.
  */
 
-/** Asks on the terminal; what is secret is not shown while it is typed. */
-async function ask(question: string, secret: boolean): Promise<string> {
-  process.stdout.write(question);
-  const silent = new Writable({ write: (_chunk, _encoding, done) => done() });
-  const terminal = createInterface({
-    input: process.stdin,
-    output: secret ? silent : process.stdout,
-    terminal: process.stdin.isTTY,
+/** Somebody at a terminal, or a file of answers, a line each. */
+interface Terminal {
+  /** What is secret is not shown while it is typed. */
+  ask(question: string, secret: boolean): Promise<string>;
+  close(): void;
+}
+
+function openTerminal(): Terminal {
+  let isHidden = false;
+  const output = new Writable({
+    write(chunk: Buffer, _encoding, done) {
+      if (!isHidden) process.stdout.write(chunk);
+      done();
+    },
   });
-  try {
-    return await terminal.question('');
-  } finally {
-    terminal.close();
-    if (secret) process.stdout.write('\n');
-  }
+  const lines = createInterface({ input: process.stdin, output, terminal: process.stdin.isTTY });
+  const answers = lines[Symbol.asyncIterator]();
+  return {
+    async ask(question, secret) {
+      process.stdout.write(question);
+      isHidden = secret;
+      const answer = await answers.next();
+      isHidden = false;
+      if (secret) process.stdout.write('\n');
+      if (answer.done === true) throw new Error('Nothing was answered.');
+      return answer.value;
+    },
+    close: () => lines.close(),
+  };
 }
 
 async function createAdmin(): Promise<string> {
   const { values } = parseArgs({ options: { email: { type: 'string' }, name: { type: 'string' } } });
   const folder = requireProgramFolder();
   const { ADMIN_EMAIL, ADMIN_NAME, ADMIN_PASSWORD } = process.env;
-  const email = values.email ?? ADMIN_EMAIL ?? (await ask('E-mail address: ', false));
-  const name = values.name ?? ADMIN_NAME ?? (await ask('Name: ', false));
-  const password = ADMIN_PASSWORD ?? (await ask('Password: ', true));
+  const terminal = openTerminal();
+  const email = values.email ?? ADMIN_EMAIL ?? (await terminal.ask('E-mail address: ', false));
+  const name = values.name ?? ADMIN_NAME ?? (await terminal.ask('Name: ', false));
+  const password = ADMIN_PASSWORD ?? (await terminal.ask('Password: ', true));
+  terminal.close();
 
   const { dataDir } = readSettings(process.env, folder);
   mkdirSync(dataDir, { recursive: true });
