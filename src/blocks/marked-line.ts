@@ -4,7 +4,7 @@
  */
 
 const markedRow = 'line-marked';
-const ringedCavity = 'cavity-ringed';
+const ringedCavity = 'ringed';
 
 /** The row that a fragment (`#headlight.3`) names inside some rendered HTML; null where it names no line of it. */
 export function lineAt(root: Element, fragment: string): Element | null {
@@ -36,6 +36,7 @@ export function markLine(root: Element, fragment: string): Element | null {
     element.removeAttribute('aria-current');
   }
   const line = lineAt(root, fragment);
+  dropTarget(root, line);
   if (line === null) return null;
   line.classList.add(markedRow);
   for (const cavity of cavitiesOf(line)) {
@@ -43,6 +44,16 @@ export function markLine(root: Element, fragment: string): Element | null {
     cavity.setAttribute('aria-current', 'true');
   }
   return line;
+}
+
+/**
+ * The router changes the address without the browser's noticing, so `:target` stays at the line that the page was
+ * opened at, and the style sheet would go on marking it. A copy in its place is no longer the target.
+ */
+function dropTarget(root: Element, line: Element | null): void {
+  const target = root.querySelector('.line:target');
+  if (target === null || target === line) return;
+  target.replaceWith(target.cloneNode(true));
 }
 
 /** Both sides' drawings of the cavity that a row sits in; none where the row is of no connector. */

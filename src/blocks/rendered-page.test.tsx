@@ -51,7 +51,7 @@ function markedLines(): string[] {
 }
 
 function ringedCavities(): (string | undefined)[] {
-  return [...document.querySelectorAll<HTMLElement>('.cavity-ringed')].map((cavity) => cavity.dataset['testid']);
+  return [...document.querySelectorAll<HTMLElement>('.ringed')].map((cavity) => cavity.dataset['testid']);
 }
 
 const scrolled = vi.fn();

@@ -114,8 +114,6 @@ function useMarkedLine(element: Held, html: string): string | null {
   const inPlace = keepsPlace(state);
   useEffect(() => {
     if (element.current === null) return;
-    // From here on the marks are ours, and no longer the style sheet's for `:target`.
-    document.documentElement.dataset['alive'] = '';
     const line = markLine(element.current, hash);
     if (line !== null && inPlace) showLine(line);
   }, [element, hash, html, inPlace]);
