@@ -23,6 +23,23 @@ export function standsSince({ state, createdAt, sentAt, updatedAt }: ProposalSum
   return state === 'waiting' ? (sentAt ?? createdAt) : updatedAt;
 }
 
+/** What may still become something, whichever has stood longest first. */
+export function openProposals(proposals: readonly ProposalSummary[]): ProposalSummary[] {
+  return longestFirst(proposals.filter(isOpen));
+}
+
+/** What was decided, the last decision first. */
+export function decidedProposals(proposals: readonly ProposalSummary[]): ProposalSummary[] {
+  return longestFirst(proposals.filter((proposal) => !isOpen(proposal))).reverse();
+}
+
+function longestFirst(proposals: readonly ProposalSummary[]): ProposalSummary[] {
+  return proposals.toSorted((a, b) => {
+    const [one, other] = [standsSince(a), standsSince(b)];
+    return one === other ? 0 : one < other ? -1 : 1;
+  });
+}
+
 /** The next thing to do with a proposal: a verb, and where it is done. */
 export interface NextStep {
   readonly verb: string;

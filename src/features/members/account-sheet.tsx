@@ -1,6 +1,8 @@
 import { useRef, type ReactElement } from 'react';
 import { Form, Link, useActionData, useFetcher, useLoaderData } from 'react-router';
+import type { ProposalSummary } from '../../../shared/contracts/views.ts';
 import { ProposalLedger } from '../../blocks/proposal-ledger.tsx';
+import { decidedProposals, openProposals } from '../../blocks/proposal-words.ts';
 import { variantWords, type Bench } from '../../lib/bench.ts';
 import { paths } from '../../lib/paths.ts';
 import { proposalsQuery, subjectQuery } from '../../lib/queries.ts';
@@ -48,7 +50,7 @@ export function AccountSheet(): ReactElement {
             </ButtonLink>
           </EmptyPlace>
         ) : (
-          <ProposalLedger proposals={proposals} memberId={member.id} caption="My proposals" withAuthor={false} />
+          <MyProposals proposals={proposals} memberId={member.id} />
         )}
       </PlainSection>
       <PlainSection id="my-bench" title="On my bench">
@@ -61,6 +63,44 @@ export function AccountSheet(): ReactElement {
         <Button>Sign out</Button>
       </Form>
     </Sheet>
+  );
+}
+
+interface MyProposalsProps {
+  readonly proposals: readonly ProposalSummary[];
+  readonly memberId: string;
+}
+
+/** So many of those that were decided are shown here; the ledger has them all. */
+const decidedShown = 5;
+
+function MyProposals({ proposals, memberId }: MyProposalsProps): ReactElement {
+  const open = openProposals(proposals);
+  const decided = decidedProposals(proposals);
+  const ledger = { memberId, withAuthor: false } as const;
+  return (
+    <>
+      {open.length === 0 ? (
+        <p>Nothing of yours is on its way.</p>
+      ) : (
+        <ProposalLedger {...ledger} proposals={open} caption="My proposals on their way, the oldest first" />
+      )}
+      {decided.length === 0 ? null : (
+        <>
+          <h3>Decided lately</h3>
+          <ProposalLedger
+            {...ledger}
+            proposals={decided.slice(0, decidedShown)}
+            caption="My proposals decided lately"
+          />
+          {decided.length <= decidedShown ? null : (
+            <p>
+              <Link to={`${paths.proposals}?state=decided`}>All {decided.length} that were decided</Link>
+            </p>
+          )}
+        </>
+      )}
+    </>
   );
 }
 

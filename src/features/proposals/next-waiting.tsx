@@ -1,4 +1,5 @@
 import type { ReactElement } from 'react';
+import { openProposals } from '../../blocks/proposal-words.ts';
 import { paths } from '../../lib/paths.ts';
 import { proposalsQuery } from '../../lib/queries.ts';
 import { useAnswer, useApi } from '../../lib/use-api.ts';
@@ -13,9 +14,7 @@ interface NextWaitingProps {
 /** Leads on to what has waited longest for this moderator. */
 export function NextWaiting({ after, memberId }: NextWaitingProps): ReactElement {
   const { proposals } = useAnswer(proposalsQuery(useApi(), 'waiting', false));
-  const [next] = proposals
-    .filter(({ id, author }) => id !== after && author.id !== memberId)
-    .toSorted((a, b) => (waitsSince(a) < waitsSince(b) ? -1 : 1));
+  const next = openProposals(proposals).find(({ id, author }) => id !== after && author.id !== memberId);
   return (
     <p className="button-row next-waiting unprinted">
       {next === undefined ? (
@@ -30,8 +29,4 @@ export function NextWaiting({ after, memberId }: NextWaitingProps): ReactElement
       )}
     </p>
   );
-}
-
-function waitsSince({ sentAt, createdAt }: { readonly sentAt: string | null; readonly createdAt: string }): string {
-  return sentAt ?? createdAt;
 }

@@ -1,8 +1,7 @@
 import type { ReactElement } from 'react';
 import { Link, useLoaderData } from 'react-router';
-import type { ProposalSummary } from '../../../shared/contracts/views.ts';
 import { ProposalLedger } from '../../blocks/proposal-ledger.tsx';
-import { isOpen, standsSince } from '../../blocks/proposal-words.ts';
+import { decidedProposals, openProposals } from '../../blocks/proposal-words.ts';
 import { paths } from '../../lib/paths.ts';
 import { proposalsQuery } from '../../lib/queries.ts';
 import { useAnswer, useApi } from '../../lib/use-api.ts';
@@ -23,7 +22,7 @@ export function ProposalsSheet(): ReactElement {
   const { showing, decides, memberId } = useLoaderData<typeof proposalsLoader>();
   const { state, mine } = asked[showing];
   const { proposals } = useAnswer(proposalsQuery(useApi(), state, mine));
-  const shown = shownOf(proposals, showing);
+  const shown = showing === 'decided' ? decidedProposals(proposals) : openProposals(proposals);
   return (
     <Sheet title={titles[showing]} line={<Choices showing={showing} />} lead={leadOf(showing, decides)}>
       <PageHead title={`${titles[showing]} · Earthstrap`} listed={false} />
@@ -83,18 +82,6 @@ function leadOf(showing: Showing, decides: boolean): string {
         ? 'What was published, declined or withdrawn.'
         : 'Your proposals that were published, declined or withdrawn.';
   }
-}
-
-/** What is still open in the order in which it began, what is decided with the last decision first. */
-function shownOf(proposals: readonly ProposalSummary[], showing: Showing): ProposalSummary[] {
-  const fitting = proposals.filter(
-    (proposal) => showing === 'waiting' || showing === 'sent-back' || isOpen(proposal) === (showing === 'mine'),
-  );
-  return fitting.toSorted((a, b) => compare(standsSince(a), standsSince(b)) * (showing === 'decided' ? -1 : 1));
-}
-
-function compare(a: string, b: string): number {
-  return a === b ? 0 : a < b ? -1 : 1;
 }
 
 function Nothing({ showing, decides }: { readonly showing: Showing; readonly decides: boolean }): ReactElement {
