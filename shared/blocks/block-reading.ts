@@ -1,4 +1,5 @@
 import { isSlug } from '../lib/slug.ts';
+import { shortened } from '../lib/quoted.ts';
 import { finding, type Finding } from '../pages/finding.ts';
 import { colourSystemLabels } from '../wire-colours/colour-codes.ts';
 import { colourSystemNames, type ColourSystem } from '../wire-colours/colour-system.ts';
@@ -42,7 +43,7 @@ export function attribute(source: SourceBlock, name: string): string | null {
 
 /** What a block is called in findings: its id, or its kind where it has none. */
 export function blockLabel(source: SourceBlock): string {
-  return source.id === null ? `This ${source.name} block` : `The ${source.name} block \`${source.id}\``;
+  return source.id === null ? `This ${source.name} block` : `The ${source.name} block \`${shortened(source.id)}\``;
 }
 
 /** Reads what every block has; attributes that nobody reads are kept. */
@@ -94,7 +95,10 @@ export function oneOf<Name extends string>(
   const found = names.find((candidate) => candidate.replace(/-/g, ' ') === plain);
   if (found === undefined) {
     findings.push(
-      unreadable(source, `has \`${name}="${text}"\`, which is not known. Write one of: ${names.join(', ')}.`),
+      unreadable(
+        source,
+        `has \`${name}="${shortened(text)}"\`, which is not known. Write one of: ${names.join(', ')}.`,
+      ),
     );
   }
   return found ?? null;
@@ -109,7 +113,7 @@ export function readColours(source: SourceBlock, page: PageOfBlock, findings: Fi
     findings.push(
       unreadable(
         source,
-        `has \`colours="${text}"\`, which is not known. Write one of: ${colourSystemNames.join(', ')}.`,
+        `has \`colours="${shortened(text)}"\`, which is not known. Write one of: ${colourSystemNames.join(', ')}.`,
       ),
     );
     return page.colours;

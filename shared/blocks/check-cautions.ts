@@ -1,3 +1,4 @@
+import { quoted } from '../lib/quoted.ts';
 import { finding, type Finding } from '../pages/finding.ts';
 import { hazardKinds, type Block, type HazardKind } from './block.ts';
 import { hazardsNamed, hazardsOf, hazardsTouched } from './hazards.ts';
@@ -21,7 +22,7 @@ export function checkCautions(blocks: readonly Block[], headings: readonly PageH
   const touches: readonly Touch[] = [
     ...blocks.flatMap((block) => hazardsTouched(block).map((kind) => touchOf(kind, block))),
     ...headings.flatMap(({ text, line }) =>
-      hazardsNamed(text).map((kind) => ({ kind, line, address: null, where: `“${text}”` })),
+      hazardsNamed(text).map((kind) => ({ kind, line, address: null, where: `${quoted(text)}` })),
     ),
   ].toSorted((a, b) => a.line - b.line);
   const covered = new Set(blocks.flatMap((block) => (block.kind === 'hazard' ? [...hazardsOf(block)] : [])));

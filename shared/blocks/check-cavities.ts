@@ -1,3 +1,4 @@
+import { shortened } from '../lib/quoted.ts';
 import { finding, type Finding } from '../pages/finding.ts';
 import { areDisjoint } from '../pages/variant.ts';
 import type { ConnectorBlock, ConnectorLine } from './block.ts';
@@ -17,7 +18,7 @@ function repeatedCavities({ lines }: ConnectorBlock): readonly Finding[] {
     const earlier = seen.get(line.cavity) ?? [];
     const clash = earlier.find((other) => !areDisjoint(other.applies, line.applies));
     if (clash !== undefined) {
-      const message = `Cavity ${line.cavity} already stands on line ${clash.line}. A second wire in it is a row \`${line.cavity}+\`; otherwise say in Years, Markets or Frames which row holds when.`;
+      const message = `Cavity ${shortened(line.cavity)} already stands on line ${clash.line}. A second wire in it is a row \`${shortened(line.cavity)}+\`; otherwise say in Years, Markets or Frames which row holds when.`;
       findings.push(finding('cavity-repeated', message, line.line, `#${line.address}`));
     }
     seen.set(line.cavity, [...earlier, line]);
@@ -31,7 +32,7 @@ function outsideFace(connector: ConnectorBlock): readonly Finding[] {
   return connector.lines
     .filter(({ cavity, further }) => further === 0 && outside.has(cavity))
     .map(({ cavity, line, address }) => {
-      const message = `Cavity ${cavity} is not on the face: its layout has ${count === 1 ? 'one cavity' : `${count} cavities`}. Correct the layout or the cavity.`;
+      const message = `Cavity ${shortened(cavity)} is not on the face: its layout has ${count === 1 ? 'one cavity' : `${count} cavities`}. Correct the layout or the cavity.`;
       return finding('cavity-outside-face', message, line, `#${address}`);
     });
 }

@@ -1,8 +1,12 @@
+import { shortened } from '../lib/quoted.ts';
 import { finding, type Finding } from '../pages/finding.ts';
 import type { Source } from '../pages/front-matter.ts';
 import type { TableBlock } from './block.ts';
 import { namesIn } from './cell-text.ts';
 import { blockAddress } from './lines.ts';
+
+/** More than these are not named in one sentence. */
+const mostNamed = 10;
 
 /** The ids of the sources that a `cite` names. */
 export function citedIds(cite: string | null): readonly string[] {
@@ -17,7 +21,10 @@ export function checkSources(block: TableBlock, sources: readonly Source[]): rea
   const label = block.id === null ? `This ${block.kind} block` : `The ${block.kind} block \`${block.id}\``;
   const unlisted = unlistedIds(block, sources);
   if (unlisted.length > 0) {
-    const message = `${label} cites ${unlisted.map((id) => `\`${id}\``).join(', ')}, which the page does not list. List it under \`sources\` in the front matter, or correct the id.`;
+    const message = `${label} cites ${unlisted
+      .slice(0, mostNamed)
+      .map((id) => `\`${shortened(id)}\``)
+      .join(', ')}, which the page does not list. List it under \`sources\` in the front matter, or correct the id.`;
     return [finding('uncited', message, block.line, at)];
   }
   if (block.cite !== null || block.lines.every(({ cite }) => cite !== null)) return [];

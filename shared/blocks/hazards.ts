@@ -51,8 +51,12 @@ function withPlural(words: string): string {
   return spaced.endsWith('y') ? `${spaced.slice(0, -1)}(?:y|ies)` : `${spaced}(?:e?s)?`;
 }
 
-/** The hazards that a text names, in the order of section 15's table. */
+/** Any of the words: most circuits have none, and need not be asked six times. */
+const anyHazard = new RegExp([...patterns.values()].map(({ source }) => source).join('|'), 'iu');
+
+/** The hazards that a text names. */
 export function hazardsNamed(text: string): readonly HazardKind[] {
+  if (!anyHazard.test(text)) return [];
   return hazardKinds.filter((kind) => patterns.get(kind)?.test(text));
 }
 

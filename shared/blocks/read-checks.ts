@@ -1,4 +1,5 @@
 import { isSlug } from '../lib/slug.ts';
+import { quoted } from '../lib/quoted.ts';
 import { finding, type Finding } from '../pages/finding.ts';
 import type { CheckColumn, CheckLine, ChecksBlock, TerminalName } from './block.ts';
 import { readHead, requireTable, unreadable, type BlockReading } from './block-reading.ts';
@@ -48,7 +49,8 @@ export function readChecks(source: SourceBlock): BlockReading {
     const expectWritten = plainCell(cellOf(columns, row, 'expect'));
     const expect = readExpectation(expectWritten);
     if (expect === null) {
-      const said = expectWritten === '' ? 'Nothing is said of what to expect' : `“${expectWritten}” is no expectation`;
+      const said =
+        expectWritten === '' ? 'Nothing is said of what to expect' : `${quoted(expectWritten)} is no expectation`;
       findings.push(
         finding('expect-unreadable', `${said}. Write ${expected}, each figure with its unit.`, row.line, `#${address}`),
       );
@@ -56,7 +58,6 @@ export function readChecks(source: SourceBlock): BlockReading {
     findings.push(...checkRow(table, row, unreadableYears, address));
     const between = plainCell(cellOf(columns, row, 'between'));
     return {
-      ...common,
       address,
       check,
       between,
@@ -65,6 +66,7 @@ export function readChecks(source: SourceBlock): BlockReading {
       expectWritten,
       at: cellText(cellOf(columns, row, 'at')),
       how: cellText(cellOf(columns, row, 'how')),
+      ...common,
     };
   });
   const block: ChecksBlock = { kind: 'checks', ...head, columns, lines, ...rest };

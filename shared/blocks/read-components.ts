@@ -1,3 +1,4 @@
+import { quoted } from '../lib/quoted.ts';
 import { finding, type Finding } from '../pages/finding.ts';
 import {
   componentKinds,
@@ -39,13 +40,13 @@ export function readComponents(source: SourceBlock): BlockReading {
     const { common, unreadableYears } = readCommonCells(columns, row, head.cite);
     const id = plainCell(cellOf(columns, row, 'id'));
     if (!isBlockId(id)) {
-      findings.push(unreadRow(row, `“${id}” is no id for a component. Write ${idExpected}.`, source.id));
+      findings.push(unreadRow(row, `${quoted(id)} is no id for a component. Write ${idExpected}.`, source.id));
       return null;
     }
     const kindWritten = plainCell(cellOf(columns, row, 'kind'));
     const componentKind = readKind(kindWritten);
     if (componentKind === null) {
-      const message = `“${kindWritten}” is no kind of component. Write one of: ${componentKinds.join(', ')}.`;
+      const message = `${quoted(kindWritten)} is no kind of component. Write one of: ${componentKinds.join(', ')}.`;
       findings.push(unreadRow(row, message, id));
       return null;
     }
@@ -58,7 +59,6 @@ export function readComponents(source: SourceBlock): BlockReading {
     }
     findings.push(...checkRow(table, row, unreadableYears, address));
     return {
-      ...common,
       address,
       id,
       componentKind,
@@ -66,6 +66,7 @@ export function readComponents(source: SourceBlock): BlockReading {
       rating: readRating(cellText(cellOf(columns, row, 'rating')) ?? ''),
       earthedBy,
       zone: cellText(cellOf(columns, row, 'zone')),
+      ...common,
     };
   });
   const block: ComponentsBlock = { kind: 'components', ...head, columns, lines, ...rest };

@@ -1,3 +1,4 @@
+import { shortened } from '../lib/quoted.ts';
 import { finding, type Finding } from '../pages/finding.ts';
 import type { ConnectorBlock, ConnectorColumn, ConnectorLine, Corner, FaceSide, LatchSide } from './block.ts';
 import {
@@ -93,7 +94,7 @@ export function readConnector(source: SourceBlock, page: PageOfBlock): BlockRead
     findings.push(...checkRow(table, row, unreadableYears, address), ...sizeFindings);
     findings.push(...checkColour(wire, colours, row.line, address));
     const capped = destinations.length > goesTo.length;
-    return { ...common, address, cavity, further, blank, capped, wire, size, circuit, goesTo };
+    return { address, cavity, further, blank, capped, wire, size, circuit, goesTo, ...common };
   });
   const face = readFace(source, lines, findings);
   const block: ConnectorBlock = {
@@ -115,9 +116,12 @@ export function readConnector(source: SourceBlock, page: PageOfBlock): BlockRead
   return { block, findings };
 }
 
+/** A cavity holds a few wires; more pluses are part of a name. */
+const mostFurther = 20;
+
 /** `2++` below a row `2` is the third wire in cavity 2; without such a row it is the name of a cavity. */
 function readCavity(written: string, cavities: Set<string>): { readonly cavity: string; readonly further: number } {
-  for (let further = trailingPluses(written); further > 0; further -= 1) {
+  for (let further = Math.min(mostFurther, trailingPluses(written)); further > 0; further -= 1) {
     const cavity = written.slice(0, -further).trim();
     if (cavities.has(cavity)) return { cavity, further };
   }
@@ -158,7 +162,9 @@ function readFace(source: SourceBlock, lines: readonly ConnectorLine[], findings
   const layout = layoutWritten === null ? null : readLayout(layoutWritten);
   if (layoutWritten !== null && layout === null) {
     const expected = `Write rows × columns (2x3), one row (5), rows of their own length (3+4), gaps (xx.xx+xxxxx) or a ring (round 6), ${mostCavities} cavities at most.`;
-    findings.push(unreadable(source, `has \`layout="${layoutWritten}"\`, which cannot be read. ${expected}`));
+    findings.push(
+      unreadable(source, `has \`layout="${shortened(layoutWritten)}"\`, which cannot be read. ${expected}`),
+    );
   }
   const seen = oneOf(source, 'seen', sides, findings);
   const first = oneOf(source, 'first', corners, findings);

@@ -1,3 +1,4 @@
+import { quoted } from '../lib/quoted.ts';
 import type { Finding } from '../pages/finding.ts';
 import type { InsideBlock, InsideColumn, InsideLine } from './block.ts';
 import { readHead, requireId, requireTable, unreadable, type BlockReading } from './block-reading.ts';
@@ -41,17 +42,17 @@ export function readInside(source: SourceBlock): BlockReading {
     }
     if (as === null) {
       findings.push(
-        unreadRow(row, `“${asWritten}” is nothing that a unit does inside. Write one of: ${joinsExpected}.`, id),
+        unreadRow(row, `${quoted(asWritten)} is nothing that a unit does inside. Write one of: ${joinsExpected}.`, id),
       );
       return null;
     }
     if (to === null && needsBothEnds(as.kind)) {
-      findings.push(unreadRow(row, `“${asWritten}” has two ends. Write the other terminal under \`To\`.`, id));
+      findings.push(unreadRow(row, `${quoted(asWritten)} has two ends. Write the other terminal under \`To\`.`, id));
       return null;
     }
     const address = insideAddress(id, from, to, common.applies);
     findings.push(...checkRow(table, row, unreadableYears, address));
-    return { ...common, address, from, to, as, when: readCondition(plainCell(cellOf(columns, row, 'when'))) };
+    return { address, from, to, as, when: readCondition(plainCell(cellOf(columns, row, 'when'))), ...common };
   });
   const block: InsideBlock = { kind: 'inside', ...head, id, columns, lines, ...rest };
   return { block, findings };

@@ -1,5 +1,7 @@
+import { quoted } from '../lib/quoted.ts';
 import { finding, type Finding } from '../pages/finding.ts';
-import { readApplicability } from '../pages/read-applicability.ts';
+import { appliesToAll } from '../pages/applicability.ts';
+import { readApplicability, type ApplicabilityReading } from '../pages/read-applicability.ts';
 import { readWireSize, type WireSize } from '../electrics/wire-sizes.ts';
 import { colourCodes, colourSystemLabels } from '../wire-colours/colour-codes.ts';
 import { colourSystemNames, type ColourSystem } from '../wire-colours/colour-system.ts';
@@ -10,7 +12,10 @@ import { cellText, plainCell } from './cell-text.ts';
 import { cellOf, type CommonColumn } from './columns.ts';
 import type { SourceTable, SourceTableRow } from './source-table.ts';
 
-/** What any row has besides its address. */
+/**
+ * What any row has besides its address. Readers put it last into their line: an object that begins with a copy and then
+ * grows costs three times as much, which a large page feels.
+ */
 export type CommonCells = Omit<Line, 'address'>;
 
 /** A row whose years cannot be read holds for all of them until they can. */
@@ -19,17 +24,20 @@ export interface RowReading {
   readonly unreadableYears: string | null;
 }
 
+const forAll: ApplicabilityReading = { applies: appliesToAll, unreadableYears: null };
+
 /** Reads the cells that every table may have. */
 export function readCommonCells<Role extends string>(
   columns: readonly Column<Role | CommonColumn>[],
   row: SourceTableRow,
   blockCite: string | null,
 ): RowReading {
-  const { applies, unreadableYears } = readApplicability({
-    years: plainCell(cellOf(columns, row, 'years')),
-    markets: plainCell(cellOf(columns, row, 'markets')),
-    frames: plainCell(cellOf(columns, row, 'frames')),
-  });
+  const years = plainCell(cellOf(columns, row, 'years'));
+  const markets = plainCell(cellOf(columns, row, 'markets'));
+  const frames = plainCell(cellOf(columns, row, 'frames'));
+  // Most rows hold for all.
+  const holdsForAll = years === '' && markets === '' && frames === '';
+  const { applies, unreadableYears } = holdsForAll ? forAll : readApplicability({ years, markets, frames });
   const common = {
     line: row.line,
     applies,
@@ -49,7 +57,7 @@ export function checkRow(
 ): readonly Finding[] {
   const findings: Finding[] = [];
   if (unreadableYears !== null) {
-    const message = `The years “${unreadableYears}” cannot be read. Write them as 1978, 1978-1981, 1980- or -1979.`;
+    const message = `The years ${quoted(unreadableYears)} cannot be read. Write them as 1978, 1978-1981, 1980- or -1979.`;
     findings.push(finding('block-unreadable', message, row.line, `#${address}`));
   }
   if (row.cells.slice(table.headings.length).some((cell) => cell !== '')) {
@@ -82,11 +90,11 @@ export function checkColour(
   const label = colourSystemLabels[system.name];
   if (reading.kind === 'ambiguous') {
     const meanings = [reading.colour, ...reading.others].map(wireColourWords).join('; or ');
-    const message = `“${written}” may be read as ${meanings}. Write two colours with a / between them, and one as ${label} has it.`;
+    const message = `${quoted(written)} may be read as ${meanings}. Write two colours with a / between them, and one as ${label} has it.`;
     return [finding('colour-ambiguous', message, line, `#${address}`)];
   }
   if (reading.kind === 'unknown') {
-    const message = `“${written}” is no colour of ${label}. ${elsewhere(written, system)}${expectedCodes(system)}`;
+    const message = `${quoted(written)} is no colour of ${label}. ${elsewhere(written, system)}${expectedCodes(system)}`;
     return [finding('colour-unknown', message, line, `#${address}`)];
   }
   return [];
@@ -118,7 +126,7 @@ export function readSizeCell(
   if (written === null || written === '?') return { size: null, findings: [] };
   const size = readWireSize(written);
   if (size !== null) return { size, findings: [] };
-  const message = `The size “${written}” cannot be read. Write square millimetres (0.85), a gauge (AWG 18), strands (28/0.30), or ? where nobody knows it.`;
+  const message = `The size ${quoted(written)} cannot be read. Write square millimetres (0.85), a gauge (AWG 18), strands (28/0.30), or ? where nobody knows it.`;
   return { size: null, findings: [finding('block-unreadable', message, line, `#${address}`)] };
 }
 

@@ -1,3 +1,4 @@
+import { quoted, shortened } from '../lib/quoted.ts';
 import { finding, type Finding } from '../pages/finding.ts';
 import { switchRoles, type Column, type SwitchBlock, type SwitchColumn, type SwitchLine } from './block.ts';
 import { attribute, oneOf, readHead, requireId, requireTable, unreadable, type BlockReading } from './block-reading.ts';
@@ -13,6 +14,9 @@ const attributes = ['zone', 'role', 'rest', 'sprung', 'moves-with'] as const;
 /** `●`, `x` and `o`, and the other circles and crosses that keyboards have for them: all one mark. */
 const oneMark = /^[●•○◯⬤◉xXoO×✕✗✓]$/;
 const groupLetter = /^\p{L}$/u;
+
+/** More than these are not named in one sentence, nor looked for in one attribute. */
+const mostNamed = 20;
 
 /** Reads a switch: a line for each position, with the contacts that it joins. */
 export function readSwitch(source: SourceBlock): BlockReading {
@@ -45,11 +49,11 @@ export function readSwitch(source: SourceBlock): BlockReading {
     const address = positionAddress(id, position, common.applies);
     const { joined, unread } = readJoined(columns, row);
     if (unread.length > 0) {
-      const message = `“${unread.join('”, “')}” is no mark. Contacts that are joined in this position have ● (or x, o) in their column; a second group has a letter.`;
+      const message = `${unread.slice(0, mostNamed).map(quoted).join(', ')} is no mark. Contacts that are joined in this position have ● (or x, o) in their column; a second group has a letter.`;
       findings.push(finding('block-unreadable', message, row.line, `#${address}`));
     }
     findings.push(...checkRow(table, row, unreadableYears, address));
-    return { ...common, address, position, joined };
+    return { address, position, joined, ...common };
   });
   const block: SwitchBlock = {
     kind: 'switch',
@@ -59,6 +63,7 @@ export function readSwitch(source: SourceBlock): BlockReading {
     role: oneOf(source, 'role', switchRoles, findings) ?? 'other',
     rest: readPosition(source, 'rest', attribute(source, 'rest'), lines, findings),
     sprung: namesIn(attribute(source, 'sprung') ?? '')
+      .slice(0, mostNamed)
       .map((name) => readPosition(source, 'sprung', name, lines, findings))
       .filter((name) => name !== null),
     movesWith: attribute(source, 'moves-with'),
@@ -131,8 +136,10 @@ function readPosition(
   if (written === null) return null;
   const found = lines.find(({ position }) => position.toLowerCase() === written.toLowerCase());
   if (found === undefined) {
-    const positions = [...new Set(lines.map(({ position }) => position))].join(', ');
-    findings.push(unreadable(source, `has \`${name}\` “${written}”, which is none of its positions (${positions}).`));
+    const positions = [...new Set(lines.map(({ position }) => position))].slice(0, mostNamed).map(shortened).join(', ');
+    findings.push(
+      unreadable(source, `has \`${name}\` ${quoted(written)}, which is none of its positions (${positions}).`),
+    );
   }
   return found?.position ?? null;
 }

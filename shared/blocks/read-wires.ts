@@ -1,3 +1,4 @@
+import { quoted } from '../lib/quoted.ts';
 import { readDecimal } from '../lib/decimal.ts';
 import { finding, type Finding } from '../pages/finding.ts';
 import type { WireColumn, WireLine, WiresBlock } from './block.ts';
@@ -64,11 +65,11 @@ export function readWires(source: SourceBlock, page: PageOfBlock): BlockReading 
     findings.push(...checkRow(table, row, unreadableYears, address), ...sizeFindings);
     findings.push(...checkColour(wire, colours, row.line, address));
     if (lengthWritten !== null && lengthWritten !== '?' && lengthMetres === null) {
-      const message = `The length “${lengthWritten}” cannot be read. Write metres (0.25), or a length with its unit (250 mm).`;
+      const message = `The length ${quoted(lengthWritten)} cannot be read. Write metres (0.25), or a length with its unit (250 mm).`;
       findings.push(finding('block-unreadable', message, row.line, `#${address}`));
     }
     const circuit = cellText(cellOf(columns, row, 'circuit'));
-    return { ...common, address, from, to, removed, wire, size, lengthMetres, circuit };
+    return { address, from, to, removed, wire, size, lengthMetres, circuit, ...common };
   });
   const block: WiresBlock = { kind: 'wires', ...head, colours, columns, lines, ...rest };
   return { block, findings };
@@ -78,7 +79,7 @@ const metresIn = { m: 1, cm: 0.01, mm: 0.001 } as const;
 
 /** A length in metres, or with its unit; null where it is none, or no wire on a motorcycle is as long (100 m). */
 export function readLengthMetres(text: string): number | null {
-  const match = /^(.+?)\s*(m|cm|mm)?$/i.exec(text.trim());
+  const match = /^([^\sa-z]+) ?(m|cm|mm)?$/i.exec(text.trim().replace(/\s+/g, ' '));
   const figure = readDecimal(match?.[1] ?? '');
   if (figure === null || figure < 0) return null;
   const unit = match?.[2]?.toLowerCase();

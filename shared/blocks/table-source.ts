@@ -61,24 +61,27 @@ function alignmentOf(cell: string): ColumnAlignment {
 function splitRow(line: string): readonly string[] {
   const text = line.trim();
   const cells: string[] = [];
-  let cell = '';
-  let at = text.startsWith('|') ? 1 : 0;
-  for (; at < text.length; at += 1) {
+  let from = text.startsWith('|') ? 1 : 0;
+  for (let at = from; at < text.length; at += 1) {
     const character = text.charAt(at);
-    const next = text.charAt(at + 1);
-    if (character === '\\' && (next === '\\' || next === '|')) {
-      cell += next === '|' ? '|' : '\\\\';
+    if (character === '\\') {
       at += 1;
     } else if (character === '|') {
-      cells.push(cell.trim());
-      cell = '';
-    } else {
-      cell += character;
+      cells.push(undoEscapes(text.slice(from, at)));
+      from = at + 1;
     }
   }
   // What follows the last pipe is a cell only where something stands there.
-  if (cell.trim() !== '' || cells.length === 0) cells.push(cell.trim());
+  const last = undoEscapes(text.slice(from));
+  if (last !== '' || cells.length === 0) cells.push(last);
   return cells;
+}
+
+function undoEscapes(cell: string): string {
+  const trimmed = cell.trim();
+  return trimmed.includes('\\|')
+    ? trimmed.replace(/\\([\\|])/g, (pair, escaped: string) => (escaped === '|' ? '|' : pair))
+    : trimmed;
 }
 
 /**

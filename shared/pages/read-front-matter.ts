@@ -1,4 +1,4 @@
-import { isMap, isNode, isScalar, LineCounter, parseDocument, type Document, type YAMLMap } from 'yaml';
+import { shortened } from '../lib/quoted.ts';
 import { colourOfWords } from '../wire-colours/colour-words.ts';
 import { colourSystemNames, type ColourName, type ColourSystem } from '../wire-colours/colour-system.ts';
 import type { Applicability } from './applicability.ts';
@@ -14,6 +14,7 @@ import {
 } from './front-matter.ts';
 import { pageKinds, type PageKind } from './page-kind.ts';
 import { readApplicability } from './read-applicability.ts';
+import { isFields, readFields, type Fields } from './yaml-fields.ts';
 
 /** What a page without front matter has: no title, notes, Japanese letters. */
 export const emptyFrontMatter: FrontMatter = {
@@ -37,9 +38,6 @@ export const emptyFrontMatter: FrontMatter = {
   },
 };
 
-/** Front matter longer than this is not read: its YAML would take longer than the page. */
-const longestFrontMatter = 16 * 1024;
-
 /** Front matter as read, with a finding for every field that could not be. */
 export interface FrontMatterReading {
   readonly frontMatter: FrontMatter;
@@ -53,67 +51,34 @@ export interface FrontMatterReading {
  * Never throws: what cannot be read has its default and a `block-unreadable` finding that says what was expected.
  */
 export function readFrontMatter(yaml: string, firstLine: number): FrontMatterReading {
-  if (yaml.length > longestFrontMatter) {
-    const message = `The front matter is longer than ${longestFrontMatter / 1024} kB and is not read. Shorten it; text belongs in the page.`;
-    return { frontMatter: emptyFrontMatter, findings: [finding('block-unreadable', message, firstLine)] };
-  }
-  const lineCounter = new LineCounter();
-  let document: Document.Parsed;
-  let values: unknown;
-  try {
-    document = parseDocument(yaml, { lineCounter, prettyErrors: false, logLevel: 'silent' });
-    values = document.toJS({ maxAliasCount: 20 });
-  } catch {
-    const message = 'The front matter is nested too deeply to be read. Write plain fields, one a line.';
-    return { frontMatter: emptyFrontMatter, findings: [finding('block-unreadable', message, firstLine)] };
-  }
-  const lineAt = (offset: number): number => firstLine + lineCounter.linePos(offset).line - 1;
-  const findings = document.errors.slice(0, 1).map(({ message, pos }) => {
-    const reason = message.split('\n')[0] ?? '';
-    const words = `The front matter cannot be read: ${reason}. Write one field a line as \`name: value\`, and put a value that has a colon in quotes.`;
-    return finding('block-unreadable', words, lineAt(pos[0]));
-  });
-  if (values === null || values === undefined) return { frontMatter: emptyFrontMatter, findings };
-  if (!isMap(document.contents) || !isFields(values)) {
-    if (findings.length > 0) return { frontMatter: emptyFrontMatter, findings };
-    const message = 'The front matter is no list of fields. Write one field a line as `name: value`.';
-    return { frontMatter: emptyFrontMatter, findings: [finding('block-unreadable', message, firstLine)] };
-  }
-  const reader = new FieldReader(values, lineOfFields(document.contents, lineAt, firstLine));
+  const { fields, lines, problem } = readFields(yaml);
+  const reader = new FieldReader(fields ?? {}, lines, firstLine);
   const frontMatter = reader.read();
   // Where the YAML itself is wrong, its fields are wrong because of that: one finding is enough.
-  return { frontMatter, findings: findings.length > 0 ? findings : reader.findings };
-}
-
-type Fields = Readonly<Record<string, unknown>>;
-
-function isFields(value: unknown): value is Fields {
-  return typeof value === 'object' && value !== null && !Array.isArray(value);
-}
-
-function lineOfFields(
-  map: YAMLMap,
-  lineAt: (offset: number) => number,
-  firstLine: number,
-): ReadonlyMap<string, number> {
-  const lines = new Map<string, number>();
-  for (const { key } of map.items) {
-    const offset = isNode(key) ? key.range?.[0] : undefined;
-    if (isScalar(key) && offset !== undefined) lines.set(String(key.value), lineAt(offset));
+  if (problem !== null) {
+    const message = `The front matter cannot be read. ${problem.message} ${fieldsExpected}, and put a value that has a colon in quotes.`;
+    return { frontMatter, findings: [finding('block-unreadable', message, firstLine + problem.line)] };
   }
-  lines.set('', firstLine);
-  return lines;
+  if (fields === null) {
+    const message = `The front matter is no list of fields. ${fieldsExpected}.`;
+    return { frontMatter, findings: [finding('block-unreadable', message, firstLine)] };
+  }
+  return { frontMatter, findings: reader.findings };
 }
+
+const fieldsExpected = 'Write one field a line as `name: value`';
 
 /** Reads field after field and gathers what could not be read. */
 class FieldReader {
   readonly findings: Finding[] = [];
   readonly #fields: Fields;
   readonly #lines: ReadonlyMap<string, number>;
+  readonly #firstLine: number;
 
-  constructor(fields: Fields, lines: ReadonlyMap<string, number>) {
+  constructor(fields: Fields, lines: ReadonlyMap<string, number>, firstLine: number) {
     this.#fields = fields;
     this.#lines = lines;
+    this.#firstLine = firstLine;
   }
 
   read(): FrontMatter {
@@ -130,7 +95,7 @@ class FieldReader {
   }
 
   #complain(field: string, message: string): void {
-    const line = this.#lines.get(field) ?? this.#lines.get('') ?? 1;
+    const line = this.#firstLine + (this.#lines.get(field) ?? 0);
     this.findings.push(finding('block-unreadable', message, line));
   }
 
@@ -148,7 +113,7 @@ class FieldReader {
     if (found === undefined) {
       this.#complain(
         field,
-        `In the front matter \`${field}: ${text}\` is not known. Write one of ${names.join(', ')}.`,
+        `In the front matter \`${field}: ${shortened(text)}\` is not known. Write one of ${names.join(', ')}.`,
       );
     }
     return found ?? null;
@@ -182,7 +147,7 @@ class FieldReader {
     if (unreadableYears !== null) {
       this.#complain(
         'applies',
-        `The years \`${unreadableYears}\` cannot be read. Write them as 1978, 1978-1981, 1980- or -1979.`,
+        `The years \`${shortened(unreadableYears)}\` cannot be read. Write them as 1978, 1978-1981, 1980- or -1979.`,
       );
     }
     return applies;
@@ -208,7 +173,7 @@ class FieldReader {
       else
         this.#complain(
           'colour-key',
-          `In the colour key \`${code}\` should be a colour in words, as in \`${code}: light green\`.`,
+          `In the colour key \`${shortened(code)}\` should be a colour in words, as in \`${shortened(code)}: light green\`.`,
         );
     }
     return Object.fromEntries(read);
@@ -231,9 +196,12 @@ class FieldReader {
       if (id === '' || /[\s,;]/.test(id)) {
         this.#complain('sources', `Source ${index + 1} has no id without spaces. ${expected}`);
       } else if (kind === undefined) {
-        this.#complain('sources', `The kind of source \`${id}\` is not known. Write one of ${sourceKinds.join(', ')}.`);
+        this.#complain(
+          'sources',
+          `The kind of source \`${shortened(id)}\` is not known. Write one of ${sourceKinds.join(', ')}.`,
+        );
       } else if (sources.some((source) => source.id === id)) {
-        this.#complain('sources', `Two sources have the id \`${id}\`. Give each its own.`);
+        this.#complain('sources', `Two sources have the id \`${shortened(id)}\`. Give each its own.`);
       } else {
         sources.push({ id, kind, title: textOf(fields['title']) ?? '', where: textOf(fields['where']) ?? null });
       }

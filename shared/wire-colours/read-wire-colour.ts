@@ -2,10 +2,10 @@ import { caseCounts, codesOf } from './colour-codes.ts';
 import type { ColourName, ColourReading, ColourSystem, WireColour } from './colour-system.ts';
 import { colourOfWords } from './colour-words.ts';
 
-/** A code that a system's writers use, with the colour that it means. */
-interface Spelling {
-  readonly code: string;
-  readonly colour: ColourName;
+/** What the codes of a system mean: by their exact letters, and whatever their case. */
+interface Codes {
+  readonly exact: ReadonlyMap<string, readonly ColourName[]>;
+  readonly folded: ReadonlyMap<string, readonly ColourName[]>;
 }
 
 const longestWritten = 80;
@@ -35,10 +35,10 @@ const fillerWords = new Set([
 export function readWireColour(written: string, system: ColourSystem): ColourReading {
   const text = written.trim();
   if (text === '' || text.length > longestWritten) return { kind: 'unknown' };
-  const spellings = spellingsOf(system);
-  const joined = readJoined(text, spellings, caseCounts(system));
+  const codes = system.name === 'own' ? codesIn(system) : publishedCodes[system.name];
+  const joined = readJoined(text, codes, caseCounts(system));
   if (joined.length > 0) return readingOf(joined);
-  const apart = readApart(text, spellings);
+  const apart = readApart(text, codes);
   return apart === null ? { kind: 'unknown' } : { kind: 'read', colour: apart };
 }
 
@@ -48,37 +48,44 @@ function readingOf(colours: readonly WireColour[]): ColourReading {
   return others.length === 0 ? { kind: 'read', colour } : { kind: 'ambiguous', colour, others };
 }
 
-function spellingsOf(system: ColourSystem): readonly Spelling[] {
-  return codesOf(system).flatMap(({ code, colour, otherSpellings }) =>
-    [code, ...otherSpellings].map((spelling) => ({ code: spelling, colour })),
-  );
-}
-
-/** Every wire that letters without anything between them can mean. */
-function readJoined(text: string, spellings: readonly Spelling[], exactCase: boolean): readonly WireColour[] {
-  const mayIgnoreCase = !exactCase || !capitalThenSmall.test(text);
-  // A capital and a small letter after it are one code: `Br` is brown and nothing else, and `Lb` is not blue with black.
-  return wiresSpelled(text, spellings, mayIgnoreCase ? sameButForCase : (a, b) => a === b);
-}
-
-function sameButForCase(a: string, b: string): boolean {
-  return a.toLowerCase() === b.toLowerCase();
-}
-
-function wiresSpelled(
-  text: string,
-  spellings: readonly Spelling[],
-  same: (a: string, b: string) => boolean,
-): readonly WireColour[] {
-  const found: WireColour[] = [];
-  for (const { code, colour } of spellings) {
-    if (same(code, text)) add(found, { base: colour, tracer: null });
-  }
-  for (const { code, colour: base } of spellings) {
-    if (!same(code, text.slice(0, code.length))) continue;
-    for (const { code: second, colour: tracer } of spellings) {
-      if (base !== tracer && same(second, text.slice(code.length))) add(found, { base, tracer });
+function codesIn(system: ColourSystem): Codes {
+  const exact = new Map<string, ColourName[]>();
+  const folded = new Map<string, ColourName[]>();
+  for (const { code, colour, otherSpellings } of codesOf(system)) {
+    for (const spelling of [code, ...otherSpellings]) {
+      note(exact, spelling, colour);
+      note(folded, spelling.toLowerCase(), colour);
     }
+  }
+  return { exact, folded };
+}
+
+function note(codes: Map<string, ColourName[]>, spelling: string, colour: ColourName): void {
+  const colours = codes.get(spelling) ?? [];
+  if (!colours.includes(colour)) codes.set(spelling, [...colours, colour]);
+}
+
+/** The published tables, put in order once: a page asks for them a thousand times. */
+const publishedCodes = {
+  jis: codesIn({ name: 'jis' }),
+  din: codesIn({ name: 'din' }),
+  'bs-au7': codesIn({ name: 'bs-au7' }),
+  iec: codesIn({ name: 'iec' }),
+} as const;
+
+/** Every wire that letters without anything between them can mean, one colour before two. */
+function readJoined(text: string, codes: Codes, exactCase: boolean): readonly WireColour[] {
+  // A capital and a small letter after it are one code: `Br` is brown and nothing else, and `Lb` is not blue with black.
+  const mayIgnoreCase = !exactCase || !capitalThenSmall.test(text);
+  const letters = mayIgnoreCase ? text.toLowerCase() : text;
+  const meanings = mayIgnoreCase ? codes.folded : codes.exact;
+  const found: WireColour[] = [];
+  for (const base of meanings.get(letters) ?? []) add(found, { base, tracer: null });
+  for (let at = 1; at < letters.length; at += 1) {
+    const bases = meanings.get(letters.slice(0, at));
+    if (bases === undefined) continue;
+    const tracers = meanings.get(letters.slice(at)) ?? [];
+    for (const base of bases) for (const tracer of tracers) if (base !== tracer) add(found, { base, tracer });
   }
   return found;
 }
@@ -88,15 +95,15 @@ function add(found: WireColour[], wire: WireColour): void {
 }
 
 /** Codes or words with something between them; null where they are not one colour or two. */
-function readApart(text: string, spellings: readonly Spelling[]): WireColour | null {
+function readApart(text: string, codes: Codes): WireColour | null {
   const tokens = text.split(/[\s/\\,+_–—-]+/).filter((token) => token !== '');
   const tracerFirst = tokens.findIndex((token) => token.toLowerCase() === 'on');
   if (tracerFirst > 0) {
-    const tracer = readColours(tokens.slice(0, tracerFirst), spellings);
-    const base = readColours(tokens.slice(tracerFirst + 1), spellings);
+    const tracer = readColours(tokens.slice(0, tracerFirst), codes);
+    const base = readColours(tokens.slice(tracerFirst + 1), codes);
     return tracer?.length === 1 && base?.length === 1 ? wireOf([...base, ...tracer]) : null;
   }
-  const colours = readColours(tokens, spellings);
+  const colours = readColours(tokens, codes);
   return colours === null ? null : wireOf(colours);
 }
 
@@ -106,13 +113,13 @@ function wireOf(colours: readonly ColourName[]): WireColour | null {
   return { base, tracer: tracer ?? null };
 }
 
-function readColours(tokens: readonly string[], spellings: readonly Spelling[]): readonly ColourName[] | null {
+function readColours(tokens: readonly string[], codes: Codes): readonly ColourName[] | null {
   const colours: ColourName[] = [];
   for (let at = 0; at < tokens.length; at += 1) {
     const token = tokens[at] ?? '';
     const next = tokens[at + 1];
     const ofTwoWords = next === undefined ? null : colourOfWords(`${token} ${next}`);
-    const colour = ofTwoWords ?? readSingle(token, spellings);
+    const colour = ofTwoWords ?? readSingle(token, codes);
     if (colour !== null) colours.push(colour);
     else if (!fillerWords.has(token.toLowerCase())) return null;
     if (ofTwoWords !== null) at += 1;
@@ -120,10 +127,9 @@ function readColours(tokens: readonly string[], spellings: readonly Spelling[]):
   return colours;
 }
 
-function readSingle(token: string, spellings: readonly Spelling[]): ColourName | null {
-  const exact = spellings.find(({ code }) => code === token);
-  if (exact !== undefined) return exact.colour;
-  const likely = new Set(spellings.filter(({ code }) => sameButForCase(code, token)).map(({ colour }) => colour));
-  const [only] = likely;
-  return likely.size === 1 && only !== undefined ? only : colourOfWords(token);
+function readSingle(token: string, codes: Codes): ColourName | null {
+  const [exact] = codes.exact.get(token) ?? [];
+  if (exact !== undefined) return exact;
+  const [likely, other] = codes.folded.get(token.toLowerCase()) ?? [];
+  return likely !== undefined && other === undefined ? likely : colourOfWords(token);
 }
