@@ -15,6 +15,7 @@ import type { Site } from './http/ssr-site.ts';
 import { createPages } from './http/ssr.ts';
 import { createStaticFiles } from './http/static-files.ts';
 import { createVisitorPages } from './http/visitor-pages.ts';
+import { createSearchFileRouter } from './search/search-file-routes.ts';
 
 export interface AppParts {
   readonly site: Site;
@@ -59,6 +60,7 @@ export function createApp(context: Context, { site, clientFolder }: AppParts): R
   if (site.middleware !== null) app.use(site.middleware);
   app.use(createSessions(sessions, baseUrl, settings.sessionSecret, now));
   app.use(signIn.middleware);
+  app.use(createSearchFileRouter({ search: services.search, signIn, reading }));
   app.use(createApiRouter({ services, signIn, reading }));
   app.use(pages.handler);
   app.use(async (error: unknown, request: Request, response: Response, next: NextFunction) => {

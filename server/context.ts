@@ -68,7 +68,12 @@ export function createContext(parts: ContextParts): Context {
     newId,
   });
   const members = createMemberService({ database, now, newId });
-  const search = createSearchService({ pages, events });
+  const search = createSearchService({
+    pages,
+    events,
+    reading: settings.reading,
+    onFailure: (failure) => logger.error({ err: failure }, 'The search ended and is started again'),
+  });
   const sessions = createSessionStore(database);
 
   sessions.prune(now());
@@ -93,6 +98,7 @@ export function createContext(parts: ContextParts): Context {
     },
     async close() {
       clearInterval(pruning);
+      await search.close();
       await parsePool.close();
       database.close();
     },

@@ -19,6 +19,11 @@ async function main(): Promise<void> {
     await seedDemo(context, join(folder, 'content'));
   }
 
+  // The first question of all should not wait until the whole book is read.
+  context.services.search.ready().catch((failure: unknown) => {
+    context.logger.error({ err: failure }, 'The search could not be made ready');
+  });
+
   const server = createServer();
   const develops = process.env['NODE_ENV'] === 'development';
   const clientFolder = develops ? null : join(folder, 'dist', 'client');

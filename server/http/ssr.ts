@@ -1,7 +1,7 @@
 import { createHeaders } from '@remix-run/node-fetch-server';
 import type { Request as ExpressRequest, RequestHandler, Response as ExpressResponse } from 'express';
 import type { Problem } from '../../shared/lib/problem.ts';
-import { createLocalApi, type Services } from '../local-api.ts';
+import { createLocalApi, type Door, type Services } from '../local-api.ts';
 import { readBenchCookies } from './bench-cookies.ts';
 import { nothingHere, putProblemHeaders, tooLong, unexpected, wrongMethod } from './problems.ts';
 import { readForm } from './read-form.ts';
@@ -26,6 +26,15 @@ export interface PagesParts {
   readonly reading: 'open' | 'members';
   /** Null where nothing may be kept: in development, and where reading is for members. */
   readonly visitorPages: VisitorPages | null;
+}
+
+/** A request for a page, as far as it is understood. */
+interface Visit {
+  readonly request: ExpressRequest;
+  readonly response: ExpressResponse;
+  readonly door: Door;
+  readonly address: URL;
+  readonly form: BodyInit | null;
 }
 
 const methods: readonly string[] = ['GET', 'HEAD', 'POST'];
@@ -66,6 +75,25 @@ export function createPages({ site, services, signIn, baseUrl, reading, visitorP
     const form = isReading(request) ? null : await readForm(request);
     if (form === null && !isReading(request)) return refuse(request, response, tooLong);
 
+    const visit = { request, response, door, address, form };
+    const key = door.actor === null ? (visitorPages?.keyOf(request) ?? null) : null;
+    if (visitorPages === null || key === null) return renderPage(visit, null);
+    const underWay = visitorPages.underWay(key);
+    if (underWay !== null) {
+      // Many ask at once for a page that was just published: one rendering serves them all.
+      await underWay;
+      if (visitorPages.send(request, response)) return;
+    }
+    const end = visitorPages.begin(key);
+    try {
+      await renderPage(visit, key);
+    } finally {
+      end();
+    }
+  }
+
+  /** Has the site make the page; kept under the key, where it has one. */
+  async function renderPage({ request, response, door, address, form }: Visit, key: string | null): Promise<void> {
     // Before anything is read: what is published while the page is made must not be hidden by it.
     const generation = visitorPages?.generation() ?? 0;
     const faults: unknown[] = [];
@@ -81,18 +109,13 @@ export function createPages({ site, services, signIn, baseUrl, reading, visitorP
 
     if (rendered.kind === 'response') return sendFetched(response, rendered.response);
     putHeaders(response, rendered.headers);
-    const template = await site.template(request.originalUrl, response);
-    const text = fillTemplate(template, rendered);
-    const key = rendered.keepable && door.actor === null ? (visitorPages?.keyOf(request) ?? null) : null;
-    if (visitorPages !== null && key !== null) {
+    const text = fillTemplate(await site.template(request.originalUrl, response), rendered);
+    if (visitorPages !== null && key !== null && rendered.keepable) {
       visitorPages.keepAndSend(key, text, generation, request, response);
       return;
     }
-    const cacheControl = !isReading(request)
-      ? noCache
-      : door.actor === null && reading === 'open'
-        ? publicCache
-        : privateCache;
+    const shared = door.actor === null && reading === 'open';
+    const cacheControl = !isReading(request) ? noCache : shared ? publicCache : privateCache;
     await sendRepresentation(request, response, { status: rendered.status, contentType: html, text, cacheControl });
   }
 

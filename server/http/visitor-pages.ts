@@ -8,7 +8,11 @@ export interface VisitorPages {
   send(request: IncomingMessage, response: ServerResponse): boolean;
   /** Under which key the page of this request may be kept; null where it may not. */
   keyOf(request: IncomingMessage): string | null;
-  /** Ask before a page is rendered, and give it to `keep`. */
+  /** The page of this key that somebody else is having rendered; null where nobody is. */
+  underWay(key: string): Promise<void> | null;
+  /** Tells the others that the page of this key is being rendered, until the function that it gives is called. */
+  begin(key: string): () => void;
+  /** Ask before a page is rendered, and give it to `keepAndSend`. */
   generation(): number;
   /** Keeps a page that was rendered for this key, and sends it. */
   keepAndSend(key: string, html: string, generation: number, request: IncomingMessage, response: ServerResponse): void;
@@ -34,6 +38,8 @@ export function createVisitorPages(
     'Cache-Control': publicCache,
     Vary: vary,
   };
+
+  const rendering = new Map<string, Promise<void>>();
 
   function keyOf(request: IncomingMessage): string | null {
     if (!isReading(request)) return null;
@@ -66,6 +72,16 @@ export function createVisitorPages(
 
   return {
     keyOf,
+    underWay: (key) => rendering.get(key) ?? null,
+    begin(key) {
+      let end = (): void => {};
+      const rendered = new Promise<void>((resolve) => (end = resolve));
+      rendering.set(key, rendered);
+      return () => {
+        if (rendering.get(key) === rendered) rendering.delete(key);
+        end();
+      };
+    },
     generation: () => kept.generation(),
     send(request, response) {
       const key = keyOf(request);

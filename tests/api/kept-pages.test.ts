@@ -49,6 +49,15 @@ describe('a page that every visitor sees alike', () => {
     expect(site.rendered).toEqual([`GET ${donor}`]);
   });
 
+  test('is rendered once for all who ask at the same time', async () => {
+    const { site, club } = await openClubWithSite();
+    const texts = await Promise.all(
+      Array.from({ length: 20 }, async () => (await askForBytes(club, donor)).bytes.toString()),
+    );
+    expect(new Set(texts).size).toBe(1);
+    expect(site.rendered).toEqual([`GET ${donor}`]);
+  });
+
   test('is compressed in the background, and then sent as the browser likes it', async () => {
     const { club } = await openClubWithSite();
     const plain = await askForBytes(club, donor, { 'accept-encoding': 'br' });
@@ -198,6 +207,13 @@ describe('a member', () => {
     expect(await (await browser(donor)).text()).toContain('for visitor');
     expect(site.rendered).toHaveLength(1);
   });
+});
+
+test('a page that cannot be made leaves nobody waiting', async () => {
+  const { site, club } = await openClubWithSite();
+  const answers = await Promise.all(Array.from({ length: 5 }, () => askForBytes(club, '/broken')));
+  expect(answers.map(({ status }) => status)).toEqual([500, 500, 500, 500, 500]);
+  expect(site.rendered).toHaveLength(5);
 });
 
 test('a page that is not there is not kept', async () => {
