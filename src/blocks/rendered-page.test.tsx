@@ -105,8 +105,8 @@ describe('a rendered page', () => {
 
   it('gives away the address of the marked line', async () => {
     const { user } = open('/donors/qf550/pinouts#headlight.1');
-    await user.click(await screen.findByRole('button', { name: 'Copy its link' }));
-    expect(await screen.findByRole('button', { name: 'Link copied' })).toBeDefined();
+    await user.click(await screen.findByRole('button', { name: 'Copy link' }));
+    expect(await screen.findByRole('button', { name: 'Copied' })).toBeDefined();
     expect(await navigator.clipboard.readText()).toBe(window.location.href);
   });
 

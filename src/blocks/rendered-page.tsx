@@ -135,7 +135,7 @@ function LineStrip({ line }: { readonly line: string }): ReactElement {
     <div className="line-strip unprinted" role="status">
       <b>{line}</b>
       <Button type="button" className="line-strip-do" onClick={() => void copy()}>
-        <LinkSign /> {copied === line ? 'Link copied' : 'Copy its link'}
+        <LinkSign /> {copied === line ? 'Copied' : 'Copy link'}
       </Button>
       <Button
         type="button"

@@ -27,11 +27,13 @@ export function TitleLine({ address, view, old = false }: TitleLineProps): React
           <Link to={paths.subject(address)}>{view.subjectTitle}</Link>
         )}
       </span>
-      {view.applies === null ? null : <span>{view.applies}</span>}
+      {view.applies === null ? null : <span className="title-line-applies">{view.applies}</span>}
       <span>
         Revision {view.revision}, {dayOf(view.publishedAt)}
       </span>
-      {view.publishedBy === null ? null : <span>Signed off by {view.publishedBy.name}</span>}
+      {view.publishedBy === null ? null : (
+        <span className="title-line-more">Signed off by {view.publishedBy.name}</span>
+      )}
       <span className="title-line-last unprinted">
         {old ? (
           <Link to={paths.page(address)}>Open the newest</Link>
