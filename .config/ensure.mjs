@@ -37,14 +37,29 @@ export function ensureNode() {
   }
 }
 
+function readJson(...path) {
+  const file = join(root, ...path);
+  return existsSync(file) ? JSON.parse(readFileSync(file, 'utf8')) : null;
+}
+
+/** True where npm has installed what the lock file names: it keeps a lock file of its own, written when all is in place. */
+function arePackagesInstalled() {
+  const wanted = readJson('package-lock.json').packages;
+  const installed = readJson('node_modules', '.package-lock.json')?.packages;
+  if (installed === undefined) return false;
+  return Object.entries(wanted).every(([path, { version, integrity, optional, devOptional }]) => {
+    const found = installed[path];
+    if (path === '' || (found === undefined && (optional || devOptional))) return true;
+    return found?.version === version && found.integrity === integrity;
+  });
+}
+
 /** Installs the packages of the lock file where they are missing or the lock has changed. */
 export function ensurePackages() {
   ensureNode();
-  const lock = createHash('sha256').update(readFileSync(join(root, 'package-lock.json'))).digest('hex');
-  if (existsSync(join(root, 'node_modules', '.package-lock.json')) && stampOf('packages') === lock) return;
+  if (arePackagesInstalled()) return;
   console.log('Installing packages (a few minutes the first time) …');
   run('npm', ['ci', '--no-audit', '--no-fund']);
-  setStamp('packages', lock);
 }
 
 const sourceFolders = ['shared', 'server', 'src', 'drizzle', '.config'];
@@ -60,7 +75,10 @@ function* filesBelow(folder) {
 
 function sourcesHash() {
   const hash = createHash('sha256');
-  const files = [...sourceFolders.flatMap((folder) => [...filesBelow(join(root, folder))]), ...sourceFiles.map((f) => join(root, f))];
+  const files = [
+    ...sourceFolders.flatMap((folder) => [...filesBelow(join(root, folder))]),
+    ...sourceFiles.map((f) => join(root, f)),
+  ];
   for (const file of files.sort()) {
     if (statSync(file).isFile()) hash.update(file.slice(root.length)).update(readFileSync(file));
   }
