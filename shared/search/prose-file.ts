@@ -35,6 +35,19 @@ export function isProseFile(value: unknown): value is ProseFile {
   return typeof value === 'object' && value !== null && 'version' in value && value.version === proseVersion && 'pages' in value;
 }
 
+/** One page for the prose index, from its document. */
+export function prosePageOf({ address, title, subjectTitle, summary, hazards, sections }: SearchDocument): ProsePage {
+  return {
+    key: formatPageAddress(address),
+    title,
+    subjectTitle,
+    summary,
+    cautions: hazards.map(({ text }) => text),
+    opening: sections.find(({ id }) => id === '')?.text ?? '',
+    sections: sections.filter(({ id }) => id !== ''),
+  };
+}
+
 /** The pages of a book for the prose index: titles and headings from the lines, the rest from the prose where it is there. */
 export function prosePages(index: LinesIndex, file: ProseFile | null): ProsePage[] {
   const packed = new Map(file?.pages.map((page) => [page[0], page]));

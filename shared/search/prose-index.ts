@@ -1,6 +1,5 @@
-import MiniSearch from 'minisearch';
-import { buildLinesIndex } from './lines-index.ts';
-import { buildProseFile, prosePages } from './prose-file.ts';
+import MiniSearch, { type SearchResult } from 'minisearch';
+import { prosePageOf } from './prose-file.ts';
 import { proseOptions, proseWords, type ProseEntry } from './prose-options.ts';
 import { proseQuery } from './prose-query.ts';
 import type { ReadQuery } from './read-query.ts';
@@ -56,7 +55,7 @@ const benchBoost = 2;
 /** Makes an index of documents at once. */
 export function buildProseIndex(documents: readonly SearchDocument[]): ProseIndex {
   const index = createProseIndex();
-  for (const page of prosePages(buildLinesIndex(documents), buildProseFile(documents))) index.setPage(page);
+  for (const document of documents) index.setPage(prosePageOf(document));
   return index;
 }
 
@@ -105,7 +104,7 @@ export function createProseIndex(): ProseIndex {
       if (someWordsOnly) results = engine.search({ combineWith: 'OR', queries: asked }, options);
       const sections: ProseFound[] = [];
       const wholePages: ProseFound[] = [];
-      for (const { id, score, terms } of results) {
+      for (const { id, score, terms } of bestOf(results, limit)) {
         if (sections.length >= limit && wholePages.length >= limit) break;
         const found = foundAt(String(id), terms, score);
         if (found === null) continue;
@@ -124,6 +123,13 @@ export function createProseIndex(): ProseIndex {
     const section = page.sections[Number(anchor)];
     return section === undefined ? null : { page, section, words, score };
   }
+}
+
+/** The first results of both kinds; equals are ordered by their address, so that every index of the same book answers alike. */
+function bestOf(results: readonly SearchResult[], limit: number): SearchResult[] {
+  let end = Math.min(results.length, limit * 8);
+  while (end < results.length && results[end]?.score === results[end - 1]?.score) end += 1;
+  return results.slice(0, end).sort((a, b) => b.score - a.score || (String(a.id) < String(b.id) ? -1 : 1));
 }
 
 /** A page's entries. A section's number stands for its anchor, since a page may have two headings of one name. */

@@ -25,10 +25,11 @@ export interface LinesAnswer {
   readonly namesSubject: 'only' | 'other' | null;
   /** The bike that was meant: what was chosen, and a year or market that the query names. */
   readonly variant: Variant;
+  readonly variantElsewhere: Variant;
 }
 
 /** Terms that name something exactly: no line that lacks one is ever shown in its place. */
-function isCode({ kind }: QueryTerm): boolean {
+export function isCode({ kind }: QueryTerm): boolean {
   return kind === 'colour' || kind === 'cavity' || kind === 'size' || kind === 'no-colour' || kind === 'number';
 }
 
@@ -41,18 +42,19 @@ function isShort(term: QueryTerm): boolean {
  * Finds the lines that answer a query, best first. A colour, cavity, size or number must be there exactly; words that
  * nothing in the book has are left out and said; only a query of nothing but words may find lines that have some of them.
  */
-export function queryLines(index: LinesIndex, query: ReadQuery, options: Partial<LinesQueryOptions> = {}): LinesAnswer {
+export function queryLines(index: LinesIndex, query: ReadQuery, options: Partial<Omit<LinesQueryOptions, 'variantElsewhere'>> = {}): LinesAnswer {
   const { bench = null, limit = 15 } = options;
   const { terms } = query;
   const masks = maskTerms(index, terms);
   const market = marketAmong(index, terms, masks.unanswered);
   const variant = variantOf(query, market?.market ?? null, options.variant ?? anyVariant);
+  const variantElsewhere = bench === null ? variant : variantOf(query, market?.market ?? null, anyVariant);
   const unanswered = terms.filter((_, number) => masks.unanswered.has(number) && number !== market?.number);
   const barred = unanswered.some((term) => isCode(term) || isShort(term));
   const required = bitsOf(terms, (term, number) => isCode(term) || !masks.unanswered.has(number));
-  const scan = createScan(index, terms, masks, { bench, variant, limit });
+  const scan = createScan(index, terms, masks, { bench, variant, variantElsewhere, limit });
   const nothing = {
-    lines: [], count: 0, namesLine: false, someWordsOnly: false, unanswered, barred, mended: masks.mended, elsewhere: [], variant,
+    lines: [], count: 0, namesLine: false, someWordsOnly: false, unanswered, barred, mended: masks.mended, elsewhere: [], variant, variantElsewhere,
     namesSubject: scan.namesOtherSubject() ? ('other' as const) : null,
   };
   if (required === 0) return nothing;

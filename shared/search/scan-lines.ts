@@ -13,6 +13,8 @@ export interface LinesQueryOptions {
   readonly bench: string | null;
   /** The one bike that is meant: lines that it rules out come last. */
   readonly variant: Variant;
+  /** What other donors' lines are held against: the year of the bike on the bench says nothing about another. */
+  readonly variantElsewhere: Variant;
   readonly limit: number;
 }
 
@@ -68,7 +70,8 @@ export function createScan(index: LinesIndex, terms: readonly QueryTerm[], found
   const { holders, pages, subjects, vocabulary, texts, details, colour, own, sizes, endStart, endIds, endTerminals, states } = index;
   const { texts: masks, against, cavities, terminals, colours, sizes: sizeMasks } = found;
   const { offsets, units } = vocabulary;
-  const applies = index.applicabilities.map((applicability) => appliesTo(applicability, options.variant));
+  const appliesOnBench = index.applicabilities.map((applicability) => appliesTo(applicability, options.variant));
+  const appliesElsewhere = index.applicabilities.map((applicability) => appliesTo(applicability, options.variantElsewhere));
   const addressed: Addressed[] = [];
   let canBeCavity = 0;
   let bareNumbers = 0;
@@ -160,6 +163,7 @@ export function createScan(index: LinesIndex, terms: readonly QueryTerm[], found
       // With a colour or cavity, a zone's name stands for a connector only where the donor has none of that name.
       const ofZone = (masks[offsets.zones + at] ?? 0) & ~ofConnectors;
       const onBench = options.bench !== null && subjects[subject]?.slug === options.bench;
+      const applies = onBench ? appliesOnBench : appliesElsewhere;
       let elsewhere = 0;
       for (const { bit, id, subjects: with_ } of addressed) if (id !== holder.id && with_.has(subject)) elsewhere |= bit;
       for (let line = holder.start; line < holder.end; line += 1) {

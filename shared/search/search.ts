@@ -3,7 +3,7 @@ import { excerptOf } from './excerpt.ts';
 import { lineHit } from './line-hit.ts';
 import type { LinesIndex } from './lines-index.ts';
 import type { ProseAnswer, ProseFound, ProseIndex } from './prose-index.ts';
-import { queryLines, type LinesAnswer } from './query-lines.ts';
+import { isCode, queryLines, type LinesAnswer } from './query-lines.ts';
 import { readQuery } from './read-query.ts';
 import { remarksOn } from './remarks.ts';
 import { offeredPage } from './offered-page.ts';
@@ -39,7 +39,7 @@ export function search(indexes: SearchIndexes, query: string, options: Partial<S
   const lines = queryLines(indexes.lines, read, { bench, variant, limit: most.lines });
   const prose = indexes.prose?.search(read, bench, most.sections) ?? nothing;
   const lineHits = lines.lines
-    .map((found) => lineHit(indexes.lines, indexes.prose, found, lines.variant))
+    .map((found) => lineHit(indexes.lines, indexes.prose, found, found.onBench ? lines.variant : lines.variantElsewhere))
     .filter((hit) => hit !== null);
   const offered = lines.elsewhere.map((holder) => offeredPage(indexes.lines, holder)).filter((hit) => hit !== null);
   const sectionHits = prose.sections.map(sectionHit);
@@ -47,7 +47,10 @@ export function search(indexes: SearchIndexes, query: string, options: Partial<S
     .slice(0, most.pages)
     .map(pageHit)
     .filter(({ address }) => !offered.some((hit) => hit.address === address));
-  const linesFirst = lines.namesLine && !lines.someWordsOnly;
+  // Lines that lack a word which some prose has with all the others come after it, unless a code asks for lines.
+  const proseHasAll = prose.sections.length + prose.pages.length > 0 && !prose.someWordsOnly;
+  const saysLess = lines.unanswered.length > 0 && proseHasAll && !read.terms.some(isCode);
+  const linesFirst = lines.namesLine && !lines.someWordsOnly && !saysLess;
   return {
     query,
     hits: order(linesFirst, lineHits, [...offered, ...sectionHits], pageHits, lines, prose).slice(0, limit),

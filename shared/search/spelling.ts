@@ -26,7 +26,7 @@ export function slipsBetween(a: string, b: string, most: number): number {
     before = previous;
     previous = row;
   }
-  return previous[b.length] ?? most + 1;
+  return Math.min(previous[b.length] ?? 0, most + 1);
 }
 
 /** The word with each pair of neighbouring letters swapped, one pair at a time: what `neutrla` may have been. */
