@@ -1,7 +1,6 @@
 import { isSlug } from '../lib/slug.ts';
 import { shortened } from '../lib/quoted.ts';
 import { finding, type Finding } from '../pages/finding.ts';
-import { colourSystemLabels } from '../wire-colours/colour-codes.ts';
 import { colourSystemNames, type ColourSystem } from '../wire-colours/colour-system.ts';
 import type { Block } from './block.ts';
 import type { SourceBlock, SourceTable } from './source-table.ts';
@@ -128,9 +127,4 @@ export function readColours(source: SourceBlock, page: PageOfBlock, findings: Fi
     );
   }
   return page.colours;
-}
-
-/** A colour system's name in a sentence. */
-export function colourSystemWords(system: ColourSystem): string {
-  return colourSystemLabels[system.name];
 }

@@ -83,6 +83,10 @@ describe('readRating', () => {
     expect(readRating('35 A blow, continuous 17 A')).toMatchObject({ amps: 17, blow: false });
   });
 
+  it('does not guess whether 1,000 Ω is one ohm or a thousand', () => {
+    expect(readRating('12 V 1,000 Ω')).toMatchObject({ volts: 12, ohms: null });
+  });
+
   it('has nothing of an empty cell, and reads no figures in a whole paragraph', () => {
     expect(readRating(' ')).toBeNull();
     expect(readRating(`30 W ${'and so on '.repeat(50)}`)).toMatchObject({ watts: null });

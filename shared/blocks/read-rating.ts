@@ -1,3 +1,4 @@
+import { readDecimal } from '../lib/decimal.ts';
 import { slugOf } from '../lib/slug.ts';
 import type { Rating } from './rating.ts';
 
@@ -54,7 +55,7 @@ export function readRating(text: string): Rating | null {
   const figures = readFigures(written);
   const feeds = readFeeds(written.replace(volts, ''));
   const continuous = new RegExp(`continuous\\s+(${number})\\s*A|(${number})\\s*A\\s+continuous`, 'i').exec(written);
-  const continuousAmps = continuous === null ? null : numberOf(continuous[1] ?? continuous[2] ?? '');
+  const continuousAmps = continuous === null ? null : readDecimal(continuous[1] ?? continuous[2] ?? '');
   return {
     written,
     volts: figures.volts,
@@ -79,7 +80,7 @@ function readFigures(text: string): Figures {
   const figures: Figures = { ...nothingRead };
   for (const [, times, written, unitWritten] of text.matchAll(quantityPattern)) {
     const { what, factor } = readUnit(unitWritten ?? '');
-    const value = numberOf(written ?? '');
+    const value = readDecimal(written ?? '');
     if (value === null) continue;
     figures[what] ??= round(value * factor * Number(times ?? 1));
   }
@@ -99,12 +100,15 @@ function readFeeds(text: string): readonly Feed[] {
   const pair = pairPattern.exec(text);
   if (pair !== null) {
     const [, firstName, secondName, first, second] = pair;
-    return [feed(firstName ?? '1', numberOf(first ?? ''), null), feed(secondName ?? '2', numberOf(second ?? ''), null)];
+    return [
+      feed(firstName ?? '1', readDecimal(first ?? ''), null),
+      feed(secondName ?? '2', readDecimal(second ?? ''), null),
+    ];
   }
   const feeds: Feed[] = [];
   for (const [, name, figure, unitWritten] of text.matchAll(feedPattern)) {
     if (name === undefined || notFeeds.has(name.toLowerCase())) continue;
-    const value = numberOf(figure ?? '');
+    const value = readDecimal(figure ?? '');
     const isPower = /^w/i.test(unitWritten ?? '');
     feeds.push(feed(name, isPower ? value : null, isPower ? null : value));
   }
@@ -115,11 +119,6 @@ function feed(written: string, watts: number | null, amps: number | null): Feed 
   const trimmed = written.trim();
   // A feed's name is a terminal's name, which holds no white space.
   return { name: /\s/.test(trimmed) ? slugOf(trimmed) : trimmed, watts, amps };
-}
-
-function numberOf(text: string): number | null {
-  const value = Number(text.replace(',', '.'));
-  return text === '' || !Number.isFinite(value) ? null : value;
 }
 
 function round(value: number): number {

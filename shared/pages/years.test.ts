@@ -7,6 +7,7 @@ describe('parseYears', () => {
     ['1978', [{ from: 1978, to: 1978 }]],
     ['1978-1981', [{ from: 1978, to: 1981 }]],
     ['1978–81', [{ from: 1978, to: 1981 }]],
+    ['1999-02', [{ from: 1999, to: 2002 }]],
     ['1978 to 1981', [{ from: 1978, to: 1981 }]],
     ['1980-', [{ from: 1980, to: null }]],
     ['from 1980', [{ from: 1980, to: null }]],
@@ -26,7 +27,7 @@ describe('parseYears', () => {
     expect(parseYears('1978-1985, 1980')).toEqual([{ from: 1978, to: 1985 }]);
   });
 
-  it.each(['1981-1978', '80', 'late models', '1978 1981', '-', '1700', '1978-2200', '1978-1979-1980'])(
+  it.each(['1981-1978', '1981-78', '80', 'late models', '1978 1981', '-', '1700', '1978-2200', '1978-1979-1980'])(
     'leaves %j unread',
     (written) => {
       expect(parseYears(written)).toBeNull();

@@ -3,6 +3,9 @@ import type { YearSpan } from './applicability.ts';
 /** The years that a motorcycle page may speak of. */
 export const believedYears = { first: 1885, last: 2100 } as const;
 
+/** No model was built for longer: `1981-78` is a slip and not 1981 to 2078. */
+const longestShortSpan = 50;
+
 const spanPattern = /^(\d{4})?\s*(?:(-|–|—|~|to|until)\s*(\d{4}|\d{2})?)?$/i;
 
 /**
@@ -38,8 +41,11 @@ function parseSpan(text: string): YearSpan | null {
 
 function endYear(from: number | null, end: string | undefined): number | null {
   if (end === undefined) return null;
-  // `1978-81` is how parts lists write it: the century is the first year's.
-  return end.length === 2 && from !== null ? Math.floor(from / 100) * 100 + Number(end) : Number(end);
+  if (end.length === 4 || from === null) return Number(end);
+  // `1978-81` is how parts lists write it: the next year after the first that ends so, or no year for a span run backwards.
+  const year = Math.floor(from / 100) * 100 + Number(end);
+  const next = year < from ? year + 100 : year;
+  return next - from > longestShortSpan ? Number.NaN : next;
 }
 
 function isBelieved(year: number | null): boolean {
