@@ -9,6 +9,8 @@ interface FaceThumbnailProps {
 const seat = 8;
 const step = 11;
 const edge = 5;
+/** One scale for all, so that a large connector looks larger. */
+const scale = 1.15;
 
 /** A connector at the size of a thumb nail, known at a glance by its shape. Says nothing to a screen reader. */
 export function FaceThumbnail({ connector }: FaceThumbnailProps): ReactElement {
@@ -18,6 +20,8 @@ export function FaceThumbnail({ connector }: FaceThumbnailProps): ReactElement {
     <svg
       className="face-thumbnail"
       viewBox={`-1 -1 ${String(plan.width + 2)} ${String(plan.height + 2)}`}
+      width={tenth(plan.width * scale)}
+      height={tenth(plan.height * scale)}
       aria-hidden="true"
       focusable="false"
       fill="none"

@@ -18,10 +18,7 @@ interface VariantChooserProps {
   readonly open?: boolean;
 }
 
-/**
- * Which bike of a donor is on the bench: its year, market and frame. Choosing keeps it in the address and on the bench;
- * a part or a topic is only shown for it.
- */
+/** Which bike of a donor is on the bench: its year, market and frame. Choosing keeps it in the address and on the bench. */
 export function VariantChooser({
   subject,
   variant,
@@ -29,19 +26,15 @@ export function VariantChooser({
   path,
   open = false,
 }: VariantChooserProps): ReactElement | null {
+  if (subject.shelf !== 'donors') return null;
   if (choices.years === null && choices.markets.length === 0 && choices.frames.length === 0) return null;
-  const isDonor = subject.shelf === 'donors';
   const words = variantWords(variant);
   return (
     <details className="variant-chooser plate" open={open}>
       <summary>{words === null ? 'Which one is yours?' : `Shown for ${words}`}</summary>
-      <Form method={isDonor ? 'post' : 'get'} action={isDonor ? paths.bench : path} preventScrollReset>
-        {isDonor ? (
-          <>
-            <input type="hidden" name="donor" value={subject.subject} />
-            <input type="hidden" name="next" value={path} />
-          </>
-        ) : null}
+      <Form method="post" action={paths.bench} preventScrollReset>
+        <input type="hidden" name="donor" value={subject.subject} />
+        <input type="hidden" name="next" value={path} />
         {/* Keyed by what is shown, so that a choice made elsewhere arrives in the fields too. */}
         <div className="variant-chooser-fields" key={words ?? ''}>
           {choices.years === null ? null : (
@@ -56,7 +49,7 @@ export function VariantChooser({
           <NameField label="Frame" name="frame" names={choices.frames} chosen={variant.frame} />
         </div>
         <p className="button-row">
-          <Button>{isDonor ? 'Put it on the bench' : 'Show it for this one'}</Button>
+          <Button>Put it on the bench</Button>
           {isAnyVariant(variant) || path === paths.bench ? null : (
             <Link to={`${path}?year=`} className="button-beside">
               Show every year

@@ -42,7 +42,11 @@ describe('the variant that a sheet is shown for', () => {
 
   it('is no other bike’s: its year says nothing about this one', () => {
     expect(variantFor({ ...qf550, subject: 'kestova-360' }, new URLSearchParams(), bench)).toEqual(anyVariant);
-    expect(variantFor({ shelf: 'parts', subject: 'qf550' }, new URLSearchParams(), bench)).toEqual(anyVariant);
+  });
+
+  it('is nobody’s on a part, which is of no year of a bike', () => {
+    const part = { shelf: 'parts', subject: 'qf550' } as const;
+    expect(variantFor(part, new URLSearchParams('year=1979'), bench)).toEqual(anyVariant);
   });
 
   it('is the address’s where that names one, even to take the bench’s choice back', () => {

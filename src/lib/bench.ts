@@ -50,12 +50,13 @@ export function variantWords(variant: Variant): string | null {
 
 /**
  * Which variant a sheet of this subject is shown for: what its address says, else the bench's where this is the donor on
- * the bench. The year of one bike says nothing about another.
+ * the bench. The year of one bike says nothing about another, nor about a part.
  */
 export function variantFor(subject: SubjectAddress, parameters: URLSearchParams, bench: Bench): Variant {
+  if (subject.shelf !== 'donors') return anyVariant;
   const asked = ['year', 'market', 'frame'].some((name) => parameters.has(name));
   if (asked) return readVariant(parameters);
-  return subject.shelf === 'donors' && subject.subject === bench.donor ? bench.variant : anyVariant;
+  return subject.subject === bench.donor ? bench.variant : anyVariant;
 }
 
 /** Reads the bench from a `Cookie` header or from `document.cookie`. */
