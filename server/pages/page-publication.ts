@@ -2,6 +2,7 @@ import { createHash } from 'node:crypto';
 import { eq, sql } from 'drizzle-orm';
 import type { PageText, SubjectContext } from '../../shared/dialect/page-text.ts';
 import type { Result } from '../../shared/lib/result.ts';
+import { createRecent } from '../../shared/lib/recent.ts';
 import { accept, refuse } from '../../shared/lib/result.ts';
 import type { PageAddress } from '../../shared/pages/address.ts';
 import type { Database } from '../db/client.ts';
@@ -9,7 +10,12 @@ import type { NewId } from '../db/new-id.ts';
 import { overrides, pages, revisionBodies, revisions, subjects } from '../db/schema/pages.ts';
 import type { Writing } from '../db/transact.ts';
 import { createDerivedWriter } from './derived-store.ts';
-import { createPageReader } from './page-store.ts';
+import { createPageReader, type SubjectRow } from './page-store.ts';
+
+/** Subjects whose ids are kept in memory. */
+const subjectsKept = 200;
+
+type SubjectIds = SubjectContext['idsElsewhere'];
 
 /** Where an address stands in the book: what a publication is decided by, and re-checked against. */
 export interface Standing {
@@ -141,6 +147,18 @@ export function createPagePublication(database: Database, newId: NewId): PagePub
     })
     .prepare();
   const derived = createDerivedWriter(database);
+  const subjectIds = createRecent<string, SubjectIds>(subjectsKept);
+
+  function idsOf({ id: subjectId, version, shelf, slug }: SubjectRow): SubjectIds {
+    const key = `${subjectId} ${String(version)}`;
+    const known = subjectIds.get(key);
+    if (known !== undefined) return known;
+    // A page of safe modifications lays its blocks over the donor's: there the same id is meant.
+    const original = reader.digestsOfSubject(shelf, slug).filter(({ kind }) => kind !== 'safe-mods');
+    const ids = original.flatMap(({ page, digest }) => digest.ids.map((id) => ({ id, page })));
+    subjectIds.set(key, ids);
+    return ids;
+  }
 
   function standing(address: PageAddress): Standing {
     const found = reader.page(address);
@@ -163,10 +181,8 @@ export function createPagePublication(database: Database, newId: NewId): PagePub
     },
     overrides: (revisionId) => reader.overrides(revisionId),
     context({ shelf, subject, page }) {
-      const others = reader.digestsOfSubject(shelf, subject).filter((other) => other.page !== page);
-      // A page of safe modifications lays its blocks over the donor's: there the same id is meant.
-      const original = others.filter(({ kind }) => kind !== 'safe-mods');
-      return { idsElsewhere: original.flatMap((other) => other.digest.ids.map((id) => ({ id, page: other.page }))) };
+      const row = reader.subject(shelf, subject);
+      return { idsElsewhere: row === null ? [] : idsOf(row).filter((one) => one.page !== page) };
     },
     publish(writing, publication, decidedOn) {
       const { address, text, markdown, summary, authorId, publishedBy, proposalId, at } = publication;

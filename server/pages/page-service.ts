@@ -1,6 +1,6 @@
 import { previewBodySchema } from '../../shared/contracts/bodies.ts';
 import { readBody } from '../../shared/contracts/read-body.ts';
-import type { PageView, ShelfView } from '../../shared/contracts/views.ts';
+import type { PageView } from '../../shared/contracts/views.ts';
 import type { PageText } from '../../shared/dialect/page-text.ts';
 import type { Problem } from '../../shared/lib/problem.ts';
 import { problem } from '../../shared/lib/problem.ts';
@@ -9,36 +9,25 @@ import type { Result } from '../../shared/lib/result.ts';
 import { accept, refuse } from '../../shared/lib/result.ts';
 import { can } from '../../shared/members/can.ts';
 import type { Actor } from '../../shared/members/member.ts';
-import { formatPageAddress, shelves, type PageAddress } from '../../shared/pages/address.ts';
+import { formatPageAddress, type PageAddress } from '../../shared/pages/address.ts';
 import type { Variant } from '../../shared/pages/applicability.ts';
 import { anyVariant } from '../../shared/pages/applicability.ts';
 import { applicabilityWords } from '../../shared/pages/applicability-words.ts';
 import { differenceOf, type Difference } from '../../shared/text/difference.ts';
 import type { Database } from '../db/client.ts';
 import { lineViews } from './line-views.ts';
+import { createPageLists } from './page-lists.ts';
 import type { PagePublication } from './page-publication.ts';
 import type { PageService, PublishedDocument } from './page-service-types.ts';
-import { createPageReader, type DocumentRow, type PageRow, type RevisionRow } from './page-store.ts';
+import { createPageReader, type DocumentRow, type PageRow, type RevisionRow, type SubjectRow } from './page-store.ts';
 import { createPageTexts } from './page-texts.ts';
-import {
-  byKind,
-  choicesView,
-  differenceView,
-  factsView,
-  findingView,
-  pageSummary,
-  revisionSummary,
-  subjectFacts,
-  subjectSummaries,
-  subjectView,
-} from './page-views.ts';
+import { differenceView, factsView, findingView, revisionSummary } from './page-views.ts';
 import type { ParsePool } from './parse-pool-types.ts';
 import { parseProblem } from './parse-problem.ts';
 import { networkOf } from './parsing-ration.ts';
 import { readersFindings } from './readers-findings.ts';
 
-/** Rows of "issued lately" on the home page, and of a page's last revisions at its foot. */
-const latelyShown = 8;
+/** A page's last revisions at its foot. */
 const lastRevisionsShown = 3;
 /** Revisions of one page that its history lists. */
 const revisionsListed = 500;
@@ -54,7 +43,7 @@ export interface PageServiceDependencies {
 
 interface Found {
   readonly page: PageRow;
-  readonly subjectTitle: string;
+  readonly subject: SubjectRow;
   readonly revision: RevisionRow;
 }
 
@@ -74,6 +63,7 @@ export function createPageService(dependencies: PageServiceDependencies): PageSe
   const reader = createPageReader(database);
   const texts = createPageTexts(database, reader, publication, parsePool);
   const differences = createRecent<string, Difference>(differencesKept);
+  const lists = createPageLists(reader);
 
   function refuseReading(actor: Actor): Problem | null {
     if (can(actor, 'read', { reading })) return null;
@@ -103,18 +93,17 @@ export function createPageService(dependencies: PageServiceDependencies): PageSe
     const found = reader.page(address);
     if (found === null) return null;
     const revision = reader.revision(found.page.id, number ?? found.page.publishedRevision);
-    return revision === null ? null : { page: found.page, subjectTitle: found.subject.title, revision };
+    return revision === null ? null : { page: found.page, subject: found.subject, revision };
   }
 
   function pageView(address: PageAddress, found: Found, text: PageText, variant: Variant): PageView {
-    const { page, subjectTitle, revision } = found;
+    const { page, subject, revision } = found;
     const { frontMatter, outline, findings } = text;
-    const listed = reader.pagesOfSubject(address.shelf, address.subject);
-    const ownFacts = frontMatter.kind === 'overview';
+    const { facts, choices, siblings } = lists.surroundings(subject);
     return {
       address: formatPageAddress(address),
       ...address,
-      subjectTitle,
+      subjectTitle: subject.title,
       title: frontMatter.title,
       kind: frontMatter.kind,
       summary: frontMatter.summary,
@@ -125,17 +114,17 @@ export function createPageService(dependencies: PageServiceDependencies): PageSe
       author: revision.author,
       publishedBy: revision.publishedBy,
       sources: [...frontMatter.sources],
-      facts: factsView(ownFacts ? frontMatter.facts : subjectFacts(listed)),
+      facts: frontMatter.kind === 'overview' ? factsView(frontMatter.facts) : facts,
       applies: applicabilityWords(frontMatter.applies),
       variant,
-      choices: choicesView(listed.flatMap(({ digest }) => digest.applicabilities)),
+      choices,
       outline: [...outline],
       findings: readersFindings(findings).map(findingView),
       overrides: reader.overrides(revision.id),
       lastRevisions: reader
         .revisionsBefore(page.id, page.publishedRevision + 1, lastRevisionsShown)
         .map(revisionSummary),
-      siblings: listed.toSorted(byKind).map(({ page: slug, title, kind }) => ({ page: slug, title, kind })),
+      siblings,
       html: texts.html(address, revision, text, variant),
     };
   }
@@ -161,26 +150,14 @@ export function createPageService(dependencies: PageServiceDependencies): PageSe
   }
 
   return {
-    home: (actor) =>
-      toReader(actor, () => {
-        const counts = reader.shelfCounts();
-        return accept({
-          shelves: shelves.map((shelf) => {
-            const count = counts.find((row) => row.shelf === shelf);
-            return { shelf, subjects: count?.subjects ?? 0, lines: count?.lines ?? 0 };
-          }),
-          donors: subjectSummaries(reader.pagesOfShelf('donors')),
-          lately: reader.lately(latelyShown).map(pageSummary),
-        });
-      }),
+    home: (actor) => toReader(actor, () => accept(lists.home())),
 
-    shelf: (actor, shelf) =>
-      toReader(actor, () => accept<ShelfView>({ shelf, subjects: subjectSummaries(reader.pagesOfShelf(shelf)) })),
+    shelf: (actor, shelf) => toReader(actor, () => accept(lists.shelf(shelf))),
 
-    subject: (actor, { shelf, subject }) =>
+    subject: (actor, address) =>
       toReader(actor, () => {
-        const rows = reader.pagesOfSubject(shelf, subject);
-        return rows[0] === undefined ? refuse(noSuchPage) : accept(subjectView(rows[0], rows));
+        const view = lists.subject(address);
+        return view === null ? refuse(noSuchPage) : accept(view);
       }),
 
     page: (actor, address, variant) => toReader(actor, () => viewRevision(address, null, variant)),

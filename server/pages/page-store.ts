@@ -14,6 +14,7 @@ import {
   subjects,
 } from '../db/schema/pages.ts';
 
+export type SubjectRow = typeof subjects.$inferSelect;
 export type PageRow = typeof pages.$inferSelect;
 
 /**
@@ -123,6 +124,10 @@ export function createPageReader({ query }: Database) {
     .where(isPresent)
     .groupBy(subjects.shelf)
     .prepare();
+  const bookVersion = query
+    .select({ version: sql<number | null>`sum(${subjects.version})` })
+    .from(subjects)
+    .prepare();
   const revision = revisionRows()
     .where(and(eq(revisions.pageId, placeholder('pageId')), eq(revisions.number, placeholder('number'))))
     .prepare();
@@ -176,6 +181,8 @@ export function createPageReader({ query }: Database) {
     lately: (limit: number) => lately.all({ limit }),
     digestsOfSubject: (shelf: Shelf, slug: string) => digests.all({ shelf, subject: slug }),
     shelfCounts: () => shelfCounts.all(),
+    /** A number that every publication raises. */
+    bookVersion: () => bookVersion.get()?.version ?? 0,
     revision: (pageId: string, number: number) => revision.get({ pageId, number }) ?? null,
     /** Newest first, below the number `before`: the key that the last list ended with. */
     revisionsBefore: (pageId: string, before: number, limit: number) => newestBefore.all({ pageId, before, limit }),

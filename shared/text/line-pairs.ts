@@ -55,6 +55,7 @@ function pairByKey(from: readonly TextLine[], to: readonly TextLine[]): [number,
  * @returns pairs of indexes, ascending in both
  */
 export function pairLines(from: readonly TextLine[], to: readonly TextLine[]): [number, number][] {
+  if (from.length === 0 || to.length === 0) return [];
   if (from.length * to.length > mostWeighedPairs) return pairByKey(from, to);
   const fromWords = from.map(countWords);
   const toWords = to.map(countWords);

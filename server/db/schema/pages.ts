@@ -5,7 +5,10 @@ import { pageKinds } from '../../../shared/pages/page-kind.ts';
 import type { PageDigest, StoredDocument } from './derived.ts';
 import { members } from './members.ts';
 
-/** A donor, part or topic. `version` counts every publication in it, so that findings know what they were reckoned from. */
+/**
+ * A donor, part or topic. `version` is raised by every publication in it and by whatever else changes what its lists
+ * show, so that findings know what they were reckoned from and lists when to be made anew.
+ */
 export const subjects = sqliteTable(
   'subjects',
   {

@@ -154,7 +154,8 @@ describe('reading the book', () => {
 describe('a page that was retired', () => {
   it('is still there, says so, and is in no list, until its next revision brings it back', async () => {
     const { pages, database, publish } = await openBookWithPinouts();
-    database.sqlite.exec("UPDATE pages SET retired_at = '2026-02-01T00:00:00.000Z' WHERE slug = 'pinouts'");
+    database.sqlite.exec(`UPDATE pages SET retired_at = '2026-02-01T00:00:00.000Z' WHERE slug = 'pinouts';
+      UPDATE subjects SET version = version + 1`);
     expect(accepted(await pages.page(null, testbike.pinouts, anyVariant))).toMatchObject({
       retired: true,
       revision: 2,
