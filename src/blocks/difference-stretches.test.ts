@@ -70,8 +70,9 @@ describe('the cells of a changed row', () => {
   });
 });
 
-it('knows the rule under a table’s heading from a row of dashes that changed', () => {
+it('knows the rule under a table’s heading, also one that grew, from a row of dashes that came', () => {
   expect(isTableRule(line(1, 'same', true, '| --- | :--: |'))).toBe(true);
+  expect(isTableRule(line(1, 'changed', true, '| --- | :--: | --- |'))).toBe(true);
   expect(isTableRule(line(1, 'added', true, '| --- | :--: |'))).toBe(false);
   expect(isTableRule(line(1, 'same', true, '| 3 | – |'))).toBe(false);
 });

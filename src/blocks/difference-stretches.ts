@@ -64,7 +64,11 @@ function trimEnds(text: string, start: boolean, end: boolean): string {
   return end ? fromStart.trimEnd() : fromStart;
 }
 
-/** True for the rule under a table's heading, which says nothing to a reader. */
+/** True for the rule under a table's heading, which says nothing to a reader, nor does its growing by a column. */
 export function isTableRule(line: LineChange): boolean {
-  return line.table && line.kind === 'same' && /^[\s|:-]+$/.test(line.words.map(({ text }) => text).join(''));
+  return (
+    line.table &&
+    (line.kind === 'same' || line.kind === 'changed') &&
+    /^[\s|:-]+$/.test(line.words.map(({ text }) => text).join(''))
+  );
 }

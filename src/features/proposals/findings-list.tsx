@@ -33,7 +33,7 @@ export function FindingsList({ findings, markdown, onLine, linked = false }: Fin
       {sorted.map((finding, index) => (
         <li key={`${String(index)}-${finding.code}`} className={`finding finding-${finding.severity}`}>
           <p>
-            <b>{severityWords[finding.severity]}:</b> {finding.message}
+            <b>{severityWords[finding.severity]}:</b> <Message text={finding.message} />
           </p>
           {finding.path === undefined ? null : <p className="finding-path">{finding.path.join(' → ')}</p>}
           {finding.applies === undefined ? null : <p className="soft">Only for {finding.applies}.</p>}
@@ -47,6 +47,18 @@ export function FindingsList({ findings, markdown, onLine, linked = false }: Fin
         </li>
       ))}
     </ol>
+  );
+}
+
+/** A finding's sentence, with what it quotes of the text set apart. */
+function Message({ text }: { readonly text: string }): ReactElement {
+  return (
+    <>
+      {text.split('`').map((part, index) => {
+        const key = `${String(index)}-${part}`;
+        return index % 2 === 1 ? <code key={key}>{part}</code> : <span key={key}>{part}</span>;
+      })}
+    </>
   );
 }
 

@@ -12,6 +12,7 @@ import { useAnswer, useApi } from '../../lib/use-api.ts';
 import { PageHead } from '../../ui/page-head.tsx';
 import { Section, Sheet, type SheetSection } from '../../ui/sheet.tsx';
 import { AuthorActs } from './author-acts.tsx';
+import { DecisionStrip } from './decision-strip.tsx';
 import { Decision } from './decision.tsx';
 import { ownText } from './editor-start.ts';
 import { FallenBehind } from './fallen-behind.tsx';
@@ -81,11 +82,7 @@ export function ProposalSheet(): ReactElement {
       </SectionOf>
       {isOpen ? (
         <>
-          <nav className="decision-strip unprinted" aria-label="At the foot of this sheet">
-            <Link className="button button-plain" to={`#${decisionId}`}>
-              {decision.text}
-            </Link>
-          </nav>
+          <DecisionStrip to={decisionId} word={decision.text} />
           <SectionOf section={decision}>
             {may.decide ? <Decision proposal={proposal} /> : null}
             {author.id === memberId ? <AuthorActs proposal={proposal} /> : null}
