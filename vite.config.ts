@@ -34,6 +34,9 @@ function scriptsLast(): Plugin {
   };
 }
 
+/** How long each plugin took is of no use to whoever starts the book. */
+const checks = { bundlerTimings: false };
+
 export default defineConfig(({ isSsrBuild }) => ({
   plugins: [react(), tailwindcss(), scriptsLast()],
   publicDir: 'src/public',
@@ -49,7 +52,7 @@ export default defineConfig(({ isSsrBuild }) => ({
         outDir: 'dist/server',
         sourcemap: true,
         copyPublicDir: false,
-        rollupOptions: { input: serverEntries },
+        rollupOptions: { input: serverEntries, checks },
       }
     : {
         target: 'es2022',
@@ -57,6 +60,7 @@ export default defineConfig(({ isSsrBuild }) => ({
         manifest: true,
         assetsInlineLimit: 0,
         rollupOptions: {
+          checks,
           // What a reader's first page needs in one file, what is rarer in a file of its own.
           output: { codeSplitting: { groups: [{ name: 'reading', tags: ['$initial'] }] } },
         },
