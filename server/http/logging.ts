@@ -23,6 +23,8 @@ export function logRequests(logger: Logger): RequestHandler {
       req: ({ id, method, url, remoteAddress }: LoggedRequest) => ({ id, method, url, remoteAddress }),
       res: ({ statusCode }: LoggedResponse) => ({ statusCode }),
     },
+    // What went wrong is logged where it was caught; here it would only be that something did.
+    customErrorObject: (_request, _response, _error, value: object) => ({ ...value, err: undefined }),
     customLogLevel: (_, response, error) => (error !== undefined || response.statusCode >= 500 ? 'error' : 'info'),
   });
 }
