@@ -45,7 +45,8 @@ export async function editorAction({ context, request }: ActionFunctionArgs) {
     await context.get(queryClientContext).invalidateQueries({ queryKey: ['viewer'] });
   }
 
-  if (readText(form, 'do') === 'look') {
+  const wanted = readText(form, 'do');
+  if (wanted !== 'keep' && wanted !== 'send') {
     const looked = await api.preview(previewBody(values));
     return looked.ok ? answer(values, null, looked.value) : answer(values, looked.refusal, null);
   }
@@ -57,7 +58,7 @@ export async function editorAction({ context, request }: ActionFunctionArgs) {
   const { id } = written.value;
   forgetTexts(browserDrawer(), values.keptAs, ({ markdown }) => markdown === values.markdown);
 
-  if (readText(form, 'do') !== 'send' || values.waiting) return done(written);
+  if (wanted !== 'send' || values.waiting) return done(written);
   const sent = await api.send(id);
   // Written and not sent: whoever tries again goes on with the draft that there is now.
   return sent.ok ? done(sent) : answer({ ...values, proposal: id }, sent.refusal, null);
