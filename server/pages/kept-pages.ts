@@ -96,7 +96,8 @@ export function createKeptPages(mostBytes: number): KeptPages {
       bytes += entry.bytes;
       makeRoom();
       // One after another, so that a crawl of the book leaves threads for everything else.
-      compressing = compressing.then(() => compress(key, entry));
+      // What cannot be compressed is sent as it is, and must not keep the next one from it.
+      compressing = compressing.then(() => compress(key, entry)).catch(() => undefined);
       return page;
     },
     clear() {
