@@ -48,17 +48,16 @@ export function proposalSummary(changes: Partial<ProposalSummary> = {}): Proposa
 
 /** A proposal as its sheet shows it: of a moderator's eyes, unless a test says otherwise. */
 export function proposalView(changes: Partial<ProposalView> = {}): ProposalView {
-  const { versions: _versions, notes: _notes, stops: _stops, ...common } = summary;
   return {
-    ...common,
+    ...summary,
     versions: [
       {
         number: 1,
         markdown: '---\ntitle: Front connectors\n---\nAs sent.\n',
-        summary: common.summary,
+        summary: summary.summary,
         baseRevision: 3,
-        createdAt: common.createdAt,
-        sentAt: common.sentAt,
+        createdAt: summary.createdAt,
+        sentAt: summary.sentAt,
       },
     ],
     notes: [],
