@@ -111,7 +111,7 @@ export function createPages({ site, services, signIn, baseUrl, reading, visitorP
     putHeaders(response, rendered.headers);
     const text = fillTemplate(await site.template(request.originalUrl, response), rendered);
     if (visitorPages !== null && key !== null && rendered.keepable) {
-      visitorPages.keepAndSend(key, text, generation, request, response);
+      await visitorPages.keepAndSend(key, text, generation, request, response);
       return;
     }
     const shared = door.actor === null && reading === 'open';

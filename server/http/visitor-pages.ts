@@ -1,6 +1,6 @@
 import type { IncomingMessage, ServerResponse } from 'node:http';
 import type { KeptPage, KeptPages } from '../pages/kept-pages.ts';
-import { chooseEncoding, isReading, publicCache, vary } from './representation.ts';
+import { chooseEncoding, compress, isReading, namesTag, publicCache, vary } from './representation.ts';
 
 /** Pages that every visitor sees alike, answered from memory. */
 export interface VisitorPages {
@@ -15,12 +15,18 @@ export interface VisitorPages {
   /** Ask before a page is rendered, and give it to `keepAndSend`. */
   generation(): number;
   /** Keeps a page that was rendered for this key, and sends it. */
-  keepAndSend(key: string, html: string, generation: number, request: IncomingMessage, response: ServerResponse): void;
+  keepAndSend(
+    key: string,
+    html: string,
+    generation: number,
+    request: IncomingMessage,
+    response: ServerResponse,
+  ): Promise<void>;
 }
 
 const variantNames: readonly string[] = ['year', 'market', 'frame'];
 /** What of a visitor's own choices a page is made with (src/lib/bench.ts). */
-const choiceCookies: readonly string[] = ['bench', 'variant', 'face'];
+const choiceCookies: readonly string[] = ['bench', 'variant'];
 const longestKey = 300;
 
 /**
@@ -52,20 +58,21 @@ export function createVisitorPages(
     return key.length > longestKey ? null : key;
   }
 
-  function sendPage(page: KeptPage, request: IncomingMessage, response: ServerResponse): void {
+  async function sendPage(page: KeptPage, request: IncomingMessage, response: ServerResponse): Promise<void> {
     const known = request.headers['if-none-match'];
-    if (known?.includes(page.etag) === true || known === '*') {
+    if (known !== undefined && namesTag(known, page.etag.replace(/^W\/|"/g, ''))) {
       response.writeHead(304, { ...page.headers, ETag: page.etag }).end();
       return;
     }
     const wanted = chooseEncoding(request.headers['accept-encoding']);
-    const compressed = wanted === 'br' ? page.brotli : wanted === 'gzip' ? page.gzip : null;
-    const body = compressed ?? page.identity;
+    const best = wanted === 'br' ? page.brotli : wanted === 'gzip' ? page.gzip : page.identity;
+    // Whoever comes before the best form is made waits for a quick one, which is still a tenth of the page.
+    const body = best ?? (await compress(page.identity, wanted, 'once'));
     response.writeHead(200, {
       ...page.headers,
       ETag: page.etag,
       'Content-Length': body.length,
-      ...(compressed === null ? {} : { 'Content-Encoding': wanted }),
+      ...(wanted === 'identity' ? {} : { 'Content-Encoding': wanted }),
     });
     response.end(request.method === 'HEAD' ? undefined : body);
   }
@@ -87,11 +94,11 @@ export function createVisitorPages(
       const key = keyOf(request);
       const page = key === null ? null : kept.get(key);
       if (page === null) return false;
-      sendPage(page, request, response);
+      sendPage(page, request, response).catch(() => response.destroy());
       return true;
     },
     keepAndSend(key, html, generation, request, response) {
-      sendPage(kept.put(key, html, headers, generation), request, response);
+      return sendPage(kept.put(key, html, headers, generation), request, response);
     },
   };
 }
