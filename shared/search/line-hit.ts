@@ -74,7 +74,6 @@ function lineOf(
   const colour = index.colours[index.colour[line] ?? 0] ?? null;
   const size = textAt(index.sizes, line);
   const applicability = index.applicabilities[index.applies[line] ?? 0] ?? appliesToAll;
-  const [reading] = colour?.readings ?? [];
   return {
     where: whereOf(index, holder, line),
     colour: colour?.code ?? null,
@@ -85,7 +84,8 @@ function lineOf(
     applies: applies.applies ? applicabilityWords(applicability) : applies.why,
     appliesHere: applies.applies,
     hazard: hazardOf(index, page, prose, line),
-    wireSvg: reading === undefined ? null : drawingMarkup(drawWire(reading)),
+    // Letters that read as two colours are drawn as both.
+    wireSvg: colour === null || colour.readings.length === 0 ? null : colour.readings.map(drawWire).map(drawingMarkup).join(''),
     faceSvg: faceMarkup(index, holder, line, variant),
   };
 }

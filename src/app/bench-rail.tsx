@@ -3,9 +3,9 @@ import { Link, NavLink } from 'react-router';
 import type { Viewer } from '../../shared/contracts/views.ts';
 import { shelves } from '../../shared/pages/address.ts';
 import { shelfLabels } from '../blocks/words.ts';
+import { SearchField } from '../features/search/search-field.tsx';
 import { paths } from '../lib/paths.ts';
 import { StrapSign } from '../ui/signs.tsx';
-import { SearchSlot } from './search-slot.tsx';
 
 /** Name, search, shelves, bench and whoever is signed in, above every sheet. */
 export function BenchRail({ viewer }: { readonly viewer: Viewer }): ReactElement {
@@ -15,7 +15,7 @@ export function BenchRail({ viewer }: { readonly viewer: Viewer }): ReactElement
         <StrapSign /> Earthstrap
       </Link>
       <div className="rail-search">
-        <SearchSlot />
+        <SearchField placement="rail" />
       </div>
       <nav className="rail-places" aria-label="The book">
         {shelves.map((shelf) => (

@@ -6,7 +6,7 @@ import { paths } from '../lib/paths.ts';
 import { ButtonLink } from '../ui/button.tsx';
 import { PageHead } from '../ui/page-head.tsx';
 import { Sheet } from '../ui/sheet.tsx';
-import { SearchSlot } from './search-slot.tsx';
+import { SearchField } from '../features/search/search-field.tsx';
 
 /** What stands where a sheet cannot: what happened, what was kept, and what to do. */
 export function ErrorSheet(): ReactElement {
@@ -34,7 +34,7 @@ function WhatToDo({ code, here }: { readonly code: Problem['code']; readonly her
     return (
       <>
         <div className="error-search">
-          <SearchSlot />
+          <SearchField placement="home" />
         </div>
         <p className="button-row error-places">
           <ButtonLink to={paths.shelf('donors')}>Look along the donors</ButtonLink>

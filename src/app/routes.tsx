@@ -5,6 +5,7 @@ import { memberRoutes } from '../features/members/routes.tsx';
 import { compareLoader, pageLoader, revisionLoader, revisionsLoader } from '../features/pages/page-loaders.ts';
 import { PageSheet } from '../features/pages/page-sheet.tsx';
 import { proposalRoutes } from '../features/proposals/routes.tsx';
+import { searchRoutes } from '../features/search/routes.ts';
 import { shelfLoader } from '../features/shelves/shelf-loader.ts';
 import { subjectLoader } from '../features/shelves/subject-loader.ts';
 import { SubjectSheet } from '../features/shelves/subject-sheet.tsx';
@@ -32,6 +33,7 @@ export const routes: RouteObject[] = [
           { index: true, id: 'home', handle: kept, loader: homeLoader, Component: HomePage },
           ...memberRoutes,
           ...proposalRoutes,
+          ...searchRoutes,
           { path: 'face', id: 'face', loader: nothing, action: faceAction, element: <></> },
           {
             path: 'bench',
