@@ -6,6 +6,7 @@ import type { Variant } from '../../shared/pages/applicability.ts';
 import { isAnyVariant, variantWords } from '../lib/bench.ts';
 import { paths } from '../lib/paths.ts';
 import { Button } from '../ui/button.tsx';
+import { classNames } from '../ui/class-names.ts';
 import { SelectField } from '../ui/field.tsx';
 
 interface VariantChooserProps {
@@ -30,7 +31,7 @@ export function VariantChooser({
   if (choices.years === null && choices.markets.length === 0 && choices.frames.length === 0) return null;
   const words = variantWords(variant);
   return (
-    <details className="variant-chooser plate" open={open}>
+    <details className={classNames('variant-chooser plate', words !== null && 'variant-chosen')} open={open}>
       <summary>{words === null ? 'Which one is yours?' : `Shown for ${words}`}</summary>
       <Form method="post" action={paths.bench} preventScrollReset>
         <input type="hidden" name="donor" value={subject.subject} />
