@@ -18,6 +18,8 @@ import { createParsingRation } from './parsing-ration.ts';
 
 /** After this time a text is given up and its worker ended. An honest page takes some tens of milliseconds. */
 const defaultDeadlineMilliseconds = 2000;
+/** On a machine that is busy with other things the worker has its time later, but not for ever. */
+const mostDeadlines = 5;
 /** Memory of one worker; a text that wants more is given up. */
 const defaultWorkerMegabytes = 256;
 const room = { each: 8, all: 64 } as const;
@@ -27,6 +29,8 @@ export interface ParsePoolDependencies {
   readonly workers: number;
   /** Milliseconds of a clock that never goes back, such as `performance.now`. */
   readonly now: () => number;
+  /** Milliseconds of processor time of this process, all its threads together. */
+  readonly processorTime?: () => number;
   readonly deadlineMilliseconds?: number;
   readonly workerMegabytes?: number;
   /** The worker's file; the book's own where it is absent. */
@@ -43,6 +47,8 @@ interface Running {
   readonly asker: ParseAsker;
   readonly task: Task;
   startedAt: number;
+  /** Processor time of the process when the text was begun. */
+  processorAt: number;
   timer: NodeJS.Timeout | null;
 }
 
@@ -52,6 +58,11 @@ const takesTooLong: TextRefusal = {
     'This text takes too long to read. Long runs of signs, deep nesting and tables with missing cells are slow: make it simpler, or divide it into two pages.',
   line: null,
 };
+
+function processorTimeOfProcess(): number {
+  const { user, system } = process.cpuUsage();
+  return (user + system) / 1000;
+}
 
 /** The worker's file: JavaScript beside the built server, TypeScript beside this file everywhere else. */
 function bookWorkerEntry(): URL {
@@ -83,6 +94,7 @@ function startWorker(entry: URL, megabytes: number): Worker {
  */
 export function createParsePool(dependencies: ParsePoolDependencies): ParsePool {
   const { workers, now, deadlineMilliseconds = defaultDeadlineMilliseconds } = dependencies;
+  const { processorTime = processorTimeOfProcess } = dependencies;
   const entry = dependencies.workerEntry ?? bookWorkerEntry();
   const ration = createParsingRation(now);
   const queue = createParseQueue<Task>(room);
@@ -105,6 +117,18 @@ export function createParsePool(dependencies: ParsePoolDependencies): ParsePool 
     next();
   }
 
+  /**
+   * Ends a worker that has had its time. What the whole process used of the processor is the most that the worker can
+   * have used: where that is less than the deadline, the machine was busy, and an honest text must not be refused for it.
+   */
+  function watch(worker: Worker, current: Running, deadlines: number): void {
+    current.timer = setTimeout(() => {
+      const left = deadlineMilliseconds - (processorTime() - current.processorAt);
+      if (left <= 0 || deadlines >= mostDeadlines) giveUp(worker, takesTooLong);
+      else watch(worker, current, deadlines + 1);
+    }, deadlineMilliseconds);
+  }
+
   function open(): Worker {
     const worker = startWorker(entry, dependencies.workerMegabytes ?? defaultWorkerMegabytes);
     worker.on('message', (message: FromParseWorker) => {
@@ -113,7 +137,8 @@ export function createParsePool(dependencies: ParsePoolDependencies): ParsePool 
       if (message.kind === 'reading') {
         // Only now: loading the parser itself is not the text's fault.
         current.startedAt = now();
-        current.timer = setTimeout(() => giveUp(worker, takesTooLong), deadlineMilliseconds);
+        current.processorAt = processorTime();
+        watch(worker, current, 1);
         return;
       }
       settle(worker);
@@ -142,7 +167,7 @@ export function createParsePool(dependencies: ParsePoolDependencies): ParsePool 
       if (taken === null) return;
       const worker = idle.pop() ?? open();
       worker.ref();
-      running.set(worker, { ...taken, startedAt: now(), timer: null });
+      running.set(worker, { ...taken, startedAt: now(), processorAt: processorTime(), timer: null });
       worker.postMessage(taken.task.request);
     }
   }

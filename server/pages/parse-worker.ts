@@ -2,6 +2,7 @@ import { parentPort } from 'node:worker_threads';
 import type { TextRefusal } from '../../shared/dialect/page-text.ts';
 import { readPage } from '../../shared/dialect/read-page.ts';
 import { renderPage } from '../../shared/dialect/render-page.ts';
+import { anyVariant } from '../../shared/pages/applicability.ts';
 import type { FromParseWorker, ParseRequest } from './parse-pool-types.ts';
 
 /** What slips past the first look and is too deep for the parser's stack. */
@@ -28,6 +29,26 @@ function read({ markdown, context, address, variant }: ParseRequest): FromParseW
 function say(message: FromParseWorker): void {
   parentPort?.postMessage(message);
 }
+
+/** A page that makes the parser ready: its first text is many times slower than the next, and that is no text's fault. */
+const firstText = `---
+title: First
+kind: pinouts
+summary: None
+---
+
+## Words
+
+> - *One* [link](#here)
+
+:::connector{#one layout="2" seen="wire side"}
+| Cavity | Wire | Goes to |
+| ------ | ---- | ------- |
+| 1 | Y/R | two.1 |
+:::
+`;
+
+read({ markdown: firstText, context: { idsElsewhere: [] }, address: null, variant: anyVariant });
 
 parentPort?.on('message', (request: ParseRequest) => {
   say({ kind: 'reading' });

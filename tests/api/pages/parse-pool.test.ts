@@ -40,6 +40,21 @@ describe('the pool that reads texts', () => {
     expect(outcomes).toEqual(['text: deadline', '<p>after it</p>']);
   });
 
+  it('lets a text have its time later where the machine is busy, but not for ever', async () => {
+    let asked = 0;
+    // A process that gets nothing of the processor.
+    const starving = scriptedPool({
+      deadlineMilliseconds: 20,
+      processorTime: () => {
+        asked += 1;
+        return 0;
+      },
+    });
+    expect(await outcome(starving, 'read for ever')).toBe('text: deadline');
+    // Once when it is begun in the pool, once when it is begun in the worker, and at each of five deadlines.
+    expect(asked).toBe(7);
+  });
+
   it('gives up a text that fills the memory, and reads the next one', async () => {
     const pool = scriptedPool({ deadlineMilliseconds: 30_000, workerMegabytes: 16 });
     expect(await outcome(pool, 'fill the memory')).toBe('text: deadline');
