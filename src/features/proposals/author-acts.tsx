@@ -41,9 +41,9 @@ const reviseWords: Readonly<Record<ProposalView['state'], string>> = {
 };
 
 function Send({ again }: { readonly again: boolean }): ReactElement {
-  const { Form, outcome, busy } = useProposalForm('send');
+  const { Form, action, outcome, busy } = useProposalForm('send');
   return (
-    <Form method="post">
+    <Form method="post" action={action}>
       {outcome === null ? null : <ProblemNotice problem={outcome.problem} />}
       <Button name="do" value="send" disabled={busy}>
         {again ? 'Send it again as it is' : 'Send to the moderators'}
@@ -53,11 +53,11 @@ function Send({ again }: { readonly again: boolean }): ReactElement {
 }
 
 function Withdraw(): ReactElement {
-  const { Form, outcome, busy } = useProposalForm('withdraw');
+  const { Form, action, outcome, busy } = useProposalForm('withdraw');
   return (
     <details className="decision-with-words" open={outcome !== null}>
       <summary className="button button-plain">Withdraw</summary>
-      <Form className="form" method="post">
+      <Form className="form" method="post" action={action}>
         {outcome === null ? null : <ProblemNotice problem={outcome.problem} />}
         <p>It will not be published. Its text stays here, but nothing more can be done with it.</p>
         <Button look="grave" name="do" value="withdraw" disabled={busy}>

@@ -22,7 +22,7 @@ export function Decision({ proposal }: { readonly proposal: ProposalView }): Rea
 const unreadCode = 'text-unread';
 
 function Publish({ proposal }: { readonly proposal: ProposalView }): ReactElement {
-  const { Form, outcome, busy } = useProposalForm('publish');
+  const { Form, action, outcome, busy } = useProposalForm('publish');
   const form = useRef<HTMLFormElement>(null);
   useFirstProblem(form, outcome);
   if (proposal.fallenBehind) {
@@ -38,7 +38,7 @@ function Publish({ proposal }: { readonly proposal: ProposalView }): ReactElemen
   }
   const stops = stopsOf(proposal.findings);
   return (
-    <Form ref={form} className="form" method="post" noValidate>
+    <Form ref={form} className="form" method="post" action={action} noValidate>
       {outcome === null ? null : <ProblemNotice problem={outcome.problem} />}
       <input type="hidden" name="version" value={proposal.versions.at(-1)?.number ?? 1} />
       {stops.length === 0 ? null : (
@@ -105,13 +105,13 @@ function isMissing(stop: FindingView, missing: readonly { code: string; address:
 }
 
 function SendBack({ fallenBehind }: { readonly fallenBehind: boolean }): ReactElement {
-  const { Form, outcome, busy } = useProposalForm('send-back');
+  const { Form, action, outcome, busy } = useProposalForm('send-back');
   const form = useRef<HTMLFormElement>(null);
   useFirstProblem(form, outcome);
   return (
     <details className="decision-with-words" open={outcome !== null || fallenBehind}>
       <summary className="button button-plain">Send back</summary>
-      <Form ref={form} className="form" method="post" noValidate>
+      <Form ref={form} className="form" method="post" action={action} noValidate>
         {outcome === null ? null : <ProblemNotice problem={outcome.problem} />}
         <TextArea
           label="What its author should do"
@@ -130,13 +130,13 @@ function SendBack({ fallenBehind }: { readonly fallenBehind: boolean }): ReactEl
 }
 
 function Decline(): ReactElement {
-  const { Form, outcome, busy } = useProposalForm('decline');
+  const { Form, action, outcome, busy } = useProposalForm('decline');
   const form = useRef<HTMLFormElement>(null);
   useFirstProblem(form, outcome);
   return (
     <details className="decision-with-words" open={outcome !== null}>
       <summary className="button button-plain">Decline</summary>
-      <Form ref={form} className="form" method="post" noValidate>
+      <Form ref={form} className="form" method="post" action={action} noValidate>
         {outcome === null ? null : <ProblemNotice problem={outcome.problem} />}
         <TextArea
           label="Why the book will not have it"

@@ -152,9 +152,13 @@ export function SignInFirst({ children }: { readonly children: ReactNode }): Rea
   const { pathname, search } = useLocation();
   return (
     <EditorSheet
-      title="Sign in first"
+      title={children === null ? 'Sign in first' : 'You were signed out'}
       line={<span className="title-line-kind">Proposal</span>}
-      lead="Anybody may read and look. What changes the book is proposed by members, under their name."
+      lead={
+        children === null
+          ? 'Anybody may read and look. What changes the book is proposed by members, under their name.'
+          : 'Nothing was lost: what you wrote stands below.'
+      }
     >
       {children ?? (
         <p className="button-row">

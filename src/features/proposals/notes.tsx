@@ -52,7 +52,7 @@ function About({ note: { address, line } }: { readonly note: Note }): ReactEleme
 }
 
 function AddNote({ html }: { readonly html: string }): ReactElement {
-  const { Form, outcome, busy } = useProposalForm('note');
+  const { Form, action, outcome, busy } = useProposalForm('note');
   const { hash } = useLocation();
   const hydrated = useHydrated();
   const form = useRef<HTMLFormElement>(null);
@@ -60,7 +60,7 @@ function AddNote({ html }: { readonly html: string }): ReactElement {
   // Whoever has marked a line of the page above wants to say something of it.
   const marked = hydrated ? lineNamed(hash, html) : null;
   return (
-    <Form ref={form} className="form" method="post" noValidate>
+    <Form ref={form} className="form" method="post" action={action} noValidate>
       {outcome === null ? null : <ProblemNotice problem={outcome.problem} />}
       <TextArea
         label="A note"

@@ -7,6 +7,7 @@ import { readText } from '../../lib/form-fields.ts';
 import { apiOf } from '../../lib/loading.ts';
 import { paths } from '../../lib/paths.ts';
 import { keepAnswer } from './keep-answer.ts';
+import { notesId } from './section-ids.ts';
 
 /** What can be done on a proposal's sheet. */
 const acts = ['note', 'send', 'withdraw', 'send-back', 'decline', 'publish'] as const;
@@ -29,7 +30,7 @@ export async function proposalAction({ context, params, request }: ActionFunctio
   const answer = await perform(api, id, act, form);
   if (answer.ok) {
     keepAnswer(context, api, answer.value);
-    return redirect(paths.proposal(id) + (act === 'note' ? '#the_notes' : ''));
+    return redirect(paths.proposal(id) + (act === 'note' ? `#${notesId}` : ''));
   }
   const values = Object.fromEntries([...form.keys()].map((name) => [name, readText(form, name)]));
   const outcome: ProposalOutcome = { act, problem: answer.refusal, values };

@@ -21,6 +21,7 @@ import { leadApart } from './lead-apart.ts';
 import { NextWaiting } from './next-waiting.tsx';
 import { Notes } from './notes.tsx';
 import type { proposalLoader } from './proposal-loader.ts';
+import { decisionId, notesId } from './section-ids.ts';
 import { Versions } from './versions.tsx';
 import { WhatBecame } from './what-became.tsx';
 
@@ -30,9 +31,8 @@ const section = {
   findings: { id: 'what_is_found', text: 'What the book finds' },
   difference: { id: 'what_changes', text: 'What changes in the text' },
   page: { id: 'how_it_will_look', text: 'How the page will look' },
-  notes: { id: 'the_notes', text: 'Notes' },
+  notes: { id: notesId, text: 'Notes' },
 } as const satisfies Record<string, SheetSection>;
-const decisionId = 'the_decision';
 
 /** A proposal: what it is, what it does to the page, what was said of it, and the decision at the foot. */
 export function ProposalSheet(): ReactElement {
