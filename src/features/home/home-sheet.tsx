@@ -11,7 +11,6 @@ import { useAnswer, useApi } from '../../lib/use-api.ts';
 import { ButtonLink } from '../../ui/button.tsx';
 import { PageHead } from '../../ui/page-head.tsx';
 import { EmptyPlace, PlainSection, Sheet } from '../../ui/sheet.tsx';
-import { examplesFor } from './examples.ts';
 import type { homeLoader } from './home-loader.ts';
 
 /** The first sheet: one question, the bike on the bench, and what was issued lately. */
@@ -25,7 +24,7 @@ export function HomeSheet({ searchField }: { readonly searchField: ReactNode }):
         description="A build club’s shared book of donor motorcycles: connectors, wires, known faults, and what may safely be changed."
         canonical={paths.home}
       />
-      <Question searchField={searchField} view={view} />
+      <Question searchField={searchField} />
       <MyBike bench={bench} view={view} />
       <PlainSection id="lately" title="Issued lately">
         {view.lately.length === 0 ? (
@@ -61,7 +60,10 @@ export function HomeSheet({ searchField }: { readonly searchField: ReactNode }):
 
 const shelfNouns = { donors: 'donor', parts: 'part', reference: 'topic' } as const;
 
-function Question({ searchField, view }: { readonly searchField: ReactNode; readonly view: HomeView }): ReactElement {
+/** Four questions that show what may be asked: a colour and a place, a cavity, a circuit, the text. */
+const examples = ['yellow red headlight', 'headlight cavity 3', 'starter relay earth', 'how to measure a pickup'];
+
+function Question({ searchField }: { readonly searchField: ReactNode }): ReactElement {
   const place = useRef<HTMLDivElement>(null);
   useEffect(() => {
     // Not under a thumb: there the keyboard would cover the sheet before it was read.
@@ -73,7 +75,7 @@ function Question({ searchField, view }: { readonly searchField: ReactNode; read
       {searchField}
       <p className="soft">Ask by a colour, a cavity, a circuit or a bike, as you would say it:</p>
       <ul className="home-examples">
-        {examplesFor(view.donors).map((example) => (
+        {examples.map((example) => (
           <li key={example}>
             <Link to={paths.search(example)}>{example}</Link>
           </li>
