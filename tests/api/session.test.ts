@@ -158,6 +158,18 @@ describe('guessing', () => {
     expect(all.filter(({ status }) => status === 429)).toHaveLength(7);
   });
 
+  test('behind a server of this machine is counted by the address that it names', async () => {
+    const club = await openHttpClub({ environment: { BASE_URL: 'http://book.example' } });
+    const { email } = club.people.writer;
+    const from = (address: string, password: string) => {
+      const headers = { 'x-forwarded-for': `198.51.100.1, ${address}`, origin: 'http://book.example' };
+      return club.openBrowser()('/api/session', sendJson('POST', { email, password }, headers));
+    };
+    for (let time = 0; time < 5; time += 1) await from('203.0.113.9', 'a wrong one');
+    expect((await from('203.0.113.9', testPassword)).status).toBe(429);
+    expect((await from('203.0.113.10', testPassword)).status).toBe(200);
+  });
+
   test('who writes down the address of somebody else is not believed', async () => {
     const club = await openHttpClub();
     const { email } = club.people.writer;
