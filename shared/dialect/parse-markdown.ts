@@ -6,7 +6,7 @@ import remarkParse from 'remark-parse';
 import { unified, type Processor } from 'unified';
 import { ownDirectivesOnly } from './own-directives.ts';
 
-const parser = unified()
+const base = unified()
   .use(remarkParse)
   // A single `~` is a range (13.8~14.6 V), not strikethrough.
   .use(remarkGfm, { singleTilde: false })
@@ -15,6 +15,11 @@ const parser = unified()
   .use(ownDirectivesOnly)
   .use(leaveOut)
   .freeze();
+const parser = base().freeze();
+const parserWithoutLateAddresses = base().use(leaveOutLateAddresses).freeze();
+
+/** What a text must have for an address to be found in it after tokenizing: as it is, or as a character reference. */
+const mayHoldAddress = /@|www|http|&(?:#|commat;)/i;
 
 /**
  * Leaves two things of the parser out. HTML as a block of its own: without it the words between tags are Markdown like
@@ -26,10 +31,18 @@ function leaveOut(this: Processor): undefined {
   data.micromarkExtensions = [...(data.micromarkExtensions ?? []), { disable: { null: ['htmlFlow', 'emailAutolink'] } }];
 }
 
+/** Leaves out the look for addresses after tokenizing: it walks the whole tree, and few pages have any. */
+function leaveOutLateAddresses(this: Processor): undefined {
+  const data = this.data();
+  data.fromMarkdownExtensions = (data.fromMarkdownExtensions ?? []).map((extensions) =>
+    [extensions].flat().map((extension) => ({ ...extension, transforms: [] })),
+  );
+}
+
 /**
  * Parses a page's Markdown in the book's dialect: CommonMark, GFM, YAML front matter, and the directives that are
  * blocks. Takes any text that `lookForLimits` lets pass; positions are of the text as given.
  */
 export function parseMarkdown(markdown: string): Root {
-  return parser.parse(markdown);
+  return (mayHoldAddress.test(markdown) ? parser : parserWithoutLateAddresses).parse(markdown);
 }

@@ -2,6 +2,7 @@ import type { Root } from 'mdast';
 import { checkBlocks } from '../blocks/check-blocks.ts';
 import { accept, refuse, type Result } from '../lib/result.ts';
 import type { Finding } from '../pages/finding.ts';
+import type { FrontMatter } from '../pages/front-matter.ts';
 import { readFrontMatter, type FrontMatterReading } from '../pages/read-front-matter.ts';
 import { dropHtml } from './drop-html.ts';
 import { linesOfNode } from './directive-source.ts';
@@ -9,11 +10,12 @@ import { lookForLimits } from './look-for-limits.ts';
 import { readOutline } from './outline.ts';
 import type { PageText, SubjectContext, TextRefusal } from './page-text.ts';
 import { parseMarkdown } from './parse-markdown.ts';
-import { placeBlocks } from './place-blocks.ts';
+import { placeBlocks, type PlacedBlocks } from './place-blocks.ts';
 import { safeTree } from './safe-tree.ts';
 import { readSections } from './sections.ts';
 import { sourceLines, type SourceLines } from './source-lines.ts';
 import { showUnnamedNotes } from './unnamed-notes.ts';
+import { areSpared, spareRows, type SparedText } from './spare-rows.ts';
 import { findUnreadOpenings } from './unread-openings.ts';
 
 const nothingElsewhere: SubjectContext = { idsElsewhere: [] };
@@ -27,15 +29,12 @@ const nothingElsewhere: SubjectContext = { idsElsewhere: [] };
 export function readPage(markdown: string, context: SubjectContext = nothingElsewhere): Result<PageText, TextRefusal> {
   const limit = lookForLimits(markdown);
   if (limit !== null) return refuse(limit);
-  const source = sourceLines(markdown);
-  const { tree, unreadOpenings, findings: openings } = parseWithBlocks(markdown, source);
-  const { frontMatter, findings: unreadFields } = takeFrontMatter(tree);
-  const { blocks, findings: unreadBlocks } = placeBlocks(tree, { source, page: frontMatter, unreadOpenings });
+  const { tree, frontMatter, blocks, findings: unread } = placePage(markdown, sourceLines(markdown));
   const leftOut = dropHtml(tree);
   showUnnamedNotes(tree);
   showFurtherCells(tree);
   const outline = readOutline(tree);
-  const findings = [...unreadFields, ...openings, ...unreadBlocks, ...leftOut, ...checkBlocks(blocks, frontMatter, context, outline)];
+  const findings = [...unread, ...leftOut, ...checkBlocks(blocks, frontMatter, context, outline)];
   return accept({
     frontMatter,
     outline,
@@ -44,6 +43,34 @@ export function readPage(markdown: string, context: SubjectContext = nothingElse
     findings: findings.toSorted((a, b) => a.line - b.line),
     tree: safeTree(tree, outline),
   });
+}
+
+interface PlacedPage extends PlacedBlocks {
+  readonly tree: Root;
+  readonly frontMatter: FrontMatter;
+}
+
+/** Parses a page and reads its blocks. */
+function placePage(markdown: string, source: SourceLines): PlacedPage {
+  const spared = spareRows(markdown, source);
+  const placed = spared === null ? null : placeSpared(spared, source);
+  return placed ?? placeParsed(parseWithBlocks(markdown, source), source);
+}
+
+/** The page by the text whose rows are empty; null where the parser has to see them, or to parse twice. */
+function placeSpared({ markdown, rows }: SparedText, source: SourceLines): PlacedPage | null {
+  const tree = parseMarkdown(markdown);
+  const openings = findUnreadOpenings(tree, source);
+  if (openings.some(({ attributes }) => attributes !== null)) return null;
+  const findings = openings.map((opening) => opening.finding);
+  const placed = placeParsed({ tree, unreadOpenings: new Map(), findings }, source);
+  return areSpared(rows, placed.blocks) ? placed : null;
+}
+
+function placeParsed({ tree, unreadOpenings, findings: openings }: ParsedPage, source: SourceLines): PlacedPage {
+  const { frontMatter, findings: unreadFields } = takeFrontMatter(tree);
+  const { blocks, findings: unreadBlocks } = placeBlocks(tree, { source, page: frontMatter, unreadOpenings });
+  return { tree, frontMatter, blocks, findings: [...unreadFields, ...openings, ...unreadBlocks] };
 }
 
 interface ParsedPage {
