@@ -1,5 +1,5 @@
 import type { ReactElement } from 'react';
-import { Link, NavLink } from 'react-router';
+import { Link, NavLink, useLocation } from 'react-router';
 import type { Viewer } from '../../shared/contracts/views.ts';
 import { shelves } from '../../shared/pages/address.ts';
 import { shelfLabels } from '../blocks/words.ts';
@@ -7,15 +7,16 @@ import { SearchField } from '../features/search/search-field.tsx';
 import { paths } from '../lib/paths.ts';
 import { StrapSign } from '../ui/signs.tsx';
 
-/** Name, search, shelves, bench and whoever is signed in, above every sheet. */
+/** Name, search (but where the sheet itself asks), shelves, bench and whoever is signed in, above every sheet. */
 export function BenchRail({ viewer }: { readonly viewer: Viewer }): ReactElement {
+  const { pathname } = useLocation();
   return (
     <header className="rail">
       <Link className="rail-name" to={paths.home}>
         <StrapSign /> Earthstrap
       </Link>
       <div className="rail-search">
-        <SearchField placement="rail" />
+        {pathname === paths.home ? null : <SearchField placement="rail" />}
       </div>
       <nav className="rail-places" aria-label="The book">
         {shelves.map((shelf) => (
