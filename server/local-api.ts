@@ -47,7 +47,9 @@ export interface LocalApi extends Api {
  * the services to say, since the HTTP door leads to them as well.
  */
 export function createLocalApi({ members, pages, proposals, search }: Services, door: Door): LocalApi {
-  const { actor, address } = door;
+  const { address } = door;
+  // Whoever signs in with a form is let in for the rest of the same request, as a browser is with its next one.
+  let { actor } = door;
   return {
     async viewer() {
       return accept({ member: actor, waiting: proposals.waitingFor(actor) });
@@ -58,10 +60,12 @@ export function createLocalApi({ members, pages, proposals, search }: Services, 
       const outcome = await door.prove(credentials.value);
       if (!outcome.ok) return outcome;
       await door.signIn(outcome.value);
-      return accept({ member: outcome.value, waiting: proposals.waitingFor(outcome.value) });
+      actor = outcome.value;
+      return accept({ member: actor, waiting: proposals.waitingFor(actor) });
     },
     async signOut() {
       await door.signOut();
+      actor = null;
       return accept(null);
     },
     async changePassword(body) {

@@ -58,6 +58,17 @@ for (const [name, open] of Object.entries(doors)) {
       expect(accepted(await asker().viewer()).member).toBeNull();
     });
 
+    test('who signs in acts as themselves from then on, in the same breath', async () => {
+      const { club, visitor } = await open();
+      const api = visitor()();
+      expect(refused(await api.propose(change)).code).toBe('sign-in-needed');
+      accepted(await api.signIn({ email: club.people.writer.email, password: testPassword }));
+      expect(accepted(await api.viewer()).member?.id).toBe(club.people.writer.id);
+      expect(accepted(await api.propose(change)).author.id).toBe(club.people.writer.id);
+      accepted(await api.signOut());
+      expect(refused(await api.propose(change)).code).toBe('sign-in-needed');
+    });
+
     test('a wrong password and a missing one are refused in different words', async () => {
       const { club, visitor } = await open();
       const asker = visitor();
