@@ -66,7 +66,25 @@ function cavitiesOf(line: Element): Element[] {
   );
 }
 
-/** Brings a row into sight by as little as it takes, so that the face it was chosen on stays where it is. */
+/**
+ * Brings a row into sight by as little as it takes: below the face that it was chosen on, where that stands at the top
+ * while the rows pass under it, and above what stands at the foot of the window (the row's own margin says how much).
+ */
 export function showLine(line: Element): void {
-  line.scrollIntoView({ block: 'nearest' });
+  const row = line.getBoundingClientRect();
+  const top = heightOfFaceAbove(line, row);
+  const window = line.ownerDocument.defaultView;
+  if (window === null) return;
+  const bottom = window.innerHeight - Number.parseFloat(window.getComputedStyle(line).scrollMarginBottom || '0');
+  const below = Math.max(0, row.bottom - bottom);
+  // A row taller than the gap shows its beginning.
+  const distance = row.top < top ? row.top - top : Math.min(below, row.top - top);
+  if (distance !== 0) window.scrollBy(0, distance);
+}
+
+/** The height that a row's face takes up at the top of the window; 0 where the face stands beside its rows. */
+function heightOfFaceAbove(line: Element, row: DOMRect): number {
+  const face = line.closest('[data-connector]')?.querySelector('.face')?.getBoundingClientRect();
+  if (face === undefined || face.right <= row.left || face.left >= row.right) return 0;
+  return face.height;
 }
