@@ -29,8 +29,9 @@ export function blockPlace(index: number, body: RootContent[]): RootContent {
   return { type: 'blockPlace', children: body, data: { hName: 'div', hProperties: { dataBlock: String(index) } } };
 }
 
-/** What stands for a block that could not be read: what is wrong with it, then what was written. */
-export function unreadPlace(messages: readonly string[], written: RootContent[]): RootContent {
+/** What stands for a block that could not be read: what is wrong with it, then what was written, its first line as code. */
+export function unreadPlace(messages: readonly string[], opening: string, written: RootContent[]): RootContent {
   const notes = messages.map((message): Paragraph => ({ type: 'paragraph', children: [{ type: 'text', value: message }] }));
-  return { type: 'blockPlace', children: [...notes, ...written], data: { hName: 'div', hProperties: { className: ['unread'] } } };
+  const first: Paragraph = { type: 'paragraph', children: [{ type: 'inlineCode', value: opening.trim() }] };
+  return { type: 'blockPlace', children: [...notes, first, ...written], data: { hName: 'div', hProperties: { className: ['unread'] } } };
 }

@@ -20,6 +20,8 @@ export function linesOfNode(node: RootContent | Root): { readonly line: number; 
 /** A directive as its source text has it. */
 export interface DirectiveSource {
   readonly block: SourceBlock;
+  /** Its first line, as written. */
+  readonly opening: string;
   /** How many colons it begins with. */
   readonly fence: number;
   /** True where a line of colons ends it, or it is a leaf. */
@@ -49,7 +51,7 @@ export function directiveSource(node: OwnDirective, source: SourceLines): Direct
     line,
     endLine,
   };
-  return { block, fence, closed, column };
+  return { block, opening, fence, closed, column };
 }
 
 function closes(lastLine: string, fence: number): boolean {

@@ -1,4 +1,5 @@
 import type { Root, RootContent } from 'mdast';
+import { toString } from 'mdast-util-to-string';
 import { finding, type Finding } from '../pages/finding.ts';
 import { linesOfNode } from './directive-source.ts';
 
@@ -20,7 +21,10 @@ export function dropHtml(tree: Root): readonly Finding[] {
       const child = node.children[at];
       if (child === undefined) continue;
       if (child.type !== 'html') {
+        const before = tags;
         visit(child);
+        // A remark by itself, or tags around nothing, leave no empty paragraph.
+        if (tags > before && child.type === 'paragraph' && toString(child).trim() === '') node.children.splice(at, 1);
         continue;
       }
       const { line } = linesOfNode(child);

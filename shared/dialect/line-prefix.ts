@@ -1,13 +1,13 @@
 /** What a line begins with: the signs of quotes, lists and notes, and what is left after them. */
 export interface LinePrefix {
   readonly quotes: number;
+  /** Those of the quotes that stand inside a list item or note that the same line begins. */
+  readonly innerQuotes: number;
   /** The columns at which the text of each list item begun here stands, from the outermost. */
   readonly listColumns: readonly number[];
   /** The first list item's own number; null where it is a bullet, or none begins. */
   readonly firstNumber: number | null;
   readonly notes: number;
-  /** True where some other quote, list or note begins inside a list item or note that this line begins. */
-  readonly nested: boolean;
   /** The column, from 0, of what follows the signs. */
   readonly column: number;
   readonly rest: string;
@@ -19,8 +19,8 @@ const tabWidth = 4;
 export function readLinePrefix(line: string): LinePrefix {
   const listColumns: number[] = [];
   let quotes = 0;
+  let innerQuotes = 0;
   let notes = 0;
-  let nested = false;
   let firstNumber: number | null = null;
   let at = 0;
   let column = 0;
@@ -31,9 +31,10 @@ export function readLinePrefix(line: string): LinePrefix {
     }
     const sign = signLength(line, at);
     if (sign === 0 || (at >= ruleFrom && line.charAt(at) !== '>')) break;
-    if (listColumns.length > 0 || notes > 0) nested = true;
-    if (line.charAt(at) === '>') quotes += 1;
-    else if (line.charAt(at) === '[') notes += 1;
+    if (line.charAt(at) === '>') {
+      quotes += 1;
+      if (listColumns.length > 0 || notes > 0) innerQuotes += 1;
+    } else if (line.charAt(at) === '[') notes += 1;
     else {
       if (listColumns.length === 0 && sign > 1) firstNumber = Number(line.slice(at, at + sign - 1));
       listColumns.push(column + sign + 1);
@@ -41,7 +42,7 @@ export function readLinePrefix(line: string): LinePrefix {
     at += sign;
     column += sign;
   }
-  return { quotes, listColumns, firstNumber, notes, nested, column, rest: line.slice(at) };
+  return { quotes, innerQuotes, listColumns, firstNumber, notes, column, rest: line.slice(at) };
 }
 
 /** How long the sign of a quote, list item or note is that stands at a place; 0 where none does. */

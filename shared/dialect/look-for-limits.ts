@@ -51,10 +51,15 @@ interface Fence {
   readonly column: number;
 }
 
+const wellFormedOpening = /^:{3,}[a-z]+(?:\{(?:[^"'{}]|"[^"]*"|'[^']*')*\})?[ \t]*$/;
+
 /** What has been seen up to a line. */
 class Look {
   #filledLines = 0;
-  #nestedBeginnings = 0;
+  #beginnings = 0;
+  /** Signs of quotes on the line before. */
+  #quotesBefore = 0;
+  #listItems = 0;
   #tableCells = 0;
   #delimiters = 0;
   #underlinedHeadings = 0;
@@ -67,8 +72,8 @@ class Look {
   #beginsItem = false;
   /** Quotes and notes on the line before, which a line without signs runs on from. */
   #openSigns = 0;
-  /** The fences' lengths of the blocks that are open, from the outermost. */
-  #directives: number[] = [];
+  /** The blocks that are open, from the outermost. */
+  #directives: { readonly fence: number; readonly isWellFormed: boolean }[] = [];
   #fence: Fence | null = null;
   #columns = 0;
   #cellsBefore = 0;
@@ -130,14 +135,21 @@ class Look {
 
   #depthRefusal(prefix: LinePrefix, number: number): TextRefusal | null {
     this.#openLists(prefix);
-    if (prefix.nested) this.#nestedBeginnings += 1;
+    const outer = prefix.quotes - prefix.innerQuotes;
+    this.#beginnings += Math.max(0, outer - this.#quotesBefore) + prefix.innerQuotes + prefix.notes;
+    this.#quotesBefore = prefix.quotes;
+    this.#listItems += prefix.listColumns.length;
+    this.#definitions += prefix.notes;
     const depth = prefix.quotes + prefix.notes + Math.max(this.#lists.length, prefix.listColumns.length);
     if (depth > limits.containerDepth) {
       return refusal('depth', number, `more than ${limits.containerDepth} quotes and lists stand inside one another`, 'Take some levels away.');
     }
-    if (this.#nestedBeginnings <= limits.nestedBeginnings) return null;
-    const what = `more than ${limits.nestedBeginnings} lines begin a list and, on the same line, a list or quote inside it`;
-    return refusal('depth', number, what, 'Begin the inner one on a line of its own, or use a table.');
+    if (this.#listItems > limits.listItems) {
+      return refusal('run', number, `the page has more than ${limits.listItems} list items`, 'Use a table, or divide the page.');
+    }
+    if (this.#beginnings <= limits.containerBeginnings) return null;
+    const what = `more than ${limits.containerBeginnings} quotes, lists and notes begin on the page`;
+    return refusal('run', number, what, 'Use tables, or divide the page.');
   }
 
   /** Closes the list items that a line is not indented for, and opens those that it begins. */
@@ -145,29 +157,33 @@ class Look {
     const first = listColumns[0];
     const numbered = firstNumber !== null;
     let followsNumbered = false;
+    let isFurther = false;
     while (this.#lists.length > 0) {
       const last = this.#lists.at(-1);
       if (last === undefined || last.column <= (first === undefined ? column : first - 2)) break;
       followsNumbered = last.numbered;
+      isFurther = true;
       this.#lists.pop();
     }
     const innermost = this.#lists.at(-1)?.column ?? 0;
     // A line indented by four more, an empty item and a number other than 1 run on as text of the paragraph.
     const mayBegin = !numbered || firstNumber === 1 || followsNumbered;
     this.#beginsItem = first !== undefined && first - 2 <= innermost + 3 && rest !== '' && mayBegin;
+    this.#beginnings += Math.max(0, listColumns.length - (isFurther ? 1 : 0));
     for (const at of listColumns.slice(0, limits.containerDepth + 1)) this.#lists.push({ column: at, numbered });
   }
 
   #directiveRefusal(rest: string, number: number): TextRefusal | null {
     const [, colons = '', name = ''] = /^(:{3,})([a-z]*)/.exec(rest) ?? [];
     if (colons === '') return null;
-    this.#endParagraph();
-    if (name === '') {
-      const closed = this.#directives.findIndex((length) => length <= colons.length);
+    if (rest.trim() === colons) {
+      const closed = this.#directives.findIndex(({ fence }) => fence <= colons.length);
+      // What was no block is text to the parser, and then so are the colons, which do not end a table either.
+      if (closed >= 0 && this.#directives.slice(closed).every(({ isWellFormed }) => isWellFormed)) this.#columns = 0;
       if (closed >= 0) this.#directives.length = closed;
-      return null;
+    } else if (isContainerName(name)) {
+      this.#directives.push({ fence: colons.length, isWellFormed: wellFormedOpening.test(rest) });
     }
-    if (isContainerName(name)) this.#directives.push(colons.length);
     if (this.#directives.length <= limits.directiveDepth) return null;
     const what = `more than ${limits.directiveDepth} blocks stand inside one another`;
     return refusal('directives', number, what, 'Close each block with a line of colons before the next begins.');
@@ -198,8 +214,7 @@ class Look {
   }
 
   #definitionRefusal(rest: string, number: number): TextRefusal | null {
-    if (!/^\[[^\]]{0,999}\]:/.test(rest)) return null;
-    this.#definitions += 1;
+    if (/^\[[^\]]{0,999}\]:/.test(rest)) this.#definitions += 1;
     if (this.#definitions <= limits.definitions) return null;
     return refusal('run', number, `more than ${limits.definitions} links or notes are defined`, 'Write links where they are used.');
   }

@@ -74,11 +74,12 @@ class Placing {
     const rest = node.children.filter((child): child is Exclude<typeof child, OwnDirective> => !isOwnDirective(child));
     const place: RootContent[] = [];
     if (reading.block === null) {
-      place.push(unreadPlace(unread === undefined ? reading.findings.map(({ message }) => message) : [unread], rest));
+      const messages = unread === undefined ? reading.findings.map(({ message }) => message) : [unread];
+      place.push(unreadPlace(messages, source.opening, rest));
     } else {
       const index = this.blocks.push(reading.block) - 1;
       if (reading.block.kind === 'hazard') place.push(blockPlace(index, rest));
-      else place.push(blockPlace(index, []), ...restBesideTable(rest, written.table !== null));
+      else place.push(...aroundTable(rest, written.table !== null, blockPlace(index, [])));
     }
     for (const child of rest) this.walk(child);
     return [...place, ...inner.flatMap((child) => this.#place(child, closers.has(child)))];
@@ -134,9 +135,10 @@ function isStrayRow({ children }: TableRow): boolean {
   return children.length === 1 && /^:{3,}$/.test(toString(children).trim());
 }
 
-function restBesideTable(rest: readonly RootContent[], hasTable: boolean): readonly RootContent[] {
+/** What stands inside a block before its table comes before the block, the rest after it. */
+function aroundTable(rest: readonly RootContent[], hasTable: boolean, place: RootContent): readonly RootContent[] {
   const table = hasTable ? rest.findIndex(({ type }) => type === 'table') : -1;
-  return rest.filter((_, at) => at !== table);
+  return table < 0 ? [place, ...rest] : [...rest.slice(0, table), place, ...rest.slice(table + 1)];
 }
 
 function addressOf({ block }: DirectiveSource): string | undefined {

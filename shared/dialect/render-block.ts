@@ -13,7 +13,7 @@ const kindNames: Readonly<Record<Exclude<TableBlock['kind'], 'connector'>, strin
   components: 'Components',
   switch: 'Switch',
   wires: 'Wires',
-  inside: 'Inside the unit',
+  inside: 'Inside',
   checks: 'Checks',
 };
 

@@ -32,6 +32,7 @@ export function renderTable(block: TableBlock, context: RenderContext, seats: Re
 }
 
 function isShown({ lines, unreadRows = [] }: TableBlock, { role }: AnyColumn, at: number): boolean {
+  if (lines.length + unreadRows.length === 0) return true;
   if (role === null || role === 'contact' || leadingRoles.has(role)) return true;
   return [...lines, ...unreadRows].some(({ cells }) => (cells[at] ?? '').trim() !== '');
 }

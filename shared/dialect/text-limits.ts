@@ -10,8 +10,9 @@ export const textLimits = {
   filledLines: 4000,
   /** Quotes, lists and notes inside one another. */
   containerDepth: 12,
-  /** Lines on which a list begins and at once another list or quote inside it. */
-  nestedBeginnings: 150,
+  listItems: 1500,
+  /** Quotes, lists and notes that begin: for each the parser moves all that it has read since. Further items count nothing. */
+  containerBeginnings: 600,
   /** Blocks (`:::`) inside one another. */
   directiveDepth: 4,
   tableColumns: 24,
@@ -30,6 +31,6 @@ export const textLimits = {
   runOnLines: 150,
   /** Headings that are made by underlining. */
   underlinedHeadings: 150,
-  /** Definitions of links and notes. */
-  definitions: 500,
+  /** Definitions of links and of notes. */
+  definitions: 400,
 } as const;
