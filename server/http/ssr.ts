@@ -34,7 +34,7 @@ interface Visit {
   readonly response: ExpressResponse;
   readonly door: Door;
   readonly address: URL;
-  readonly form: BodyInit | null;
+  readonly form: Uint8Array<ArrayBuffer> | null;
 }
 
 const methods: readonly string[] = ['GET', 'HEAD', 'POST'];
