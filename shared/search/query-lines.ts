@@ -23,6 +23,8 @@ export interface LinesAnswer {
   readonly elsewhere: readonly number[];
   /** True where the query names a subject: alone (`only`), or some other one than that on the bench (`other`). */
   readonly namesSubject: 'only' | 'other' | null;
+  /** The terms that are part of a subject's name. */
+  readonly subjectTerms: readonly QueryTerm[];
   /** The bike that was meant: what was chosen, and a year or market that the query names. */
   readonly variant: Variant;
   readonly variantElsewhere: Variant;
@@ -55,6 +57,7 @@ export function queryLines(index: LinesIndex, query: ReadQuery, options: Partial
   const scan = createScan(index, terms, masks, { bench, variant, variantElsewhere, limit });
   const nothing = {
     lines: [], count: 0, namesLine: false, someWordsOnly: false, unanswered, barred, mended: masks.mended, elsewhere: [], variant, variantElsewhere,
+    subjectTerms: terms.filter((_, number) => (scan.subjectTerms & (1 << number)) !== 0),
     namesSubject: scan.namesOtherSubject() ? ('other' as const) : null,
   };
   if (required === 0) return nothing;
@@ -63,7 +66,10 @@ export function queryLines(index: LinesIndex, query: ReadQuery, options: Partial
   const all = barred ? { lines: [], count: 0, inLine: false } : scan.run(required, required);
   if (all.count > 0) return { ...nothing, ...all, namesLine: hasCode || all.inLine };
   if (hasCode) {
-    const words = bitsOf(terms, (term, number) => !isCode(term) && !masks.unanswered.has(number));
+    // A model's number is a word of its name, and leads to its pages.
+    const isWord = (term: QueryTerm, number: number): boolean =>
+      term.kind === 'number' ? (scan.subjectTerms & (1 << number)) !== 0 : !isCode(term);
+    const words = bitsOf(terms, (term, number) => isWord(term, number) && !masks.unanswered.has(number));
     return { ...nothing, namesLine: true, elsewhere: scan.holdersNamed(words) };
   }
   if (barred) return nothing;

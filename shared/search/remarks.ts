@@ -42,11 +42,11 @@ function remarkOnUnanswered({ unanswered, lines, barred }: LinesAnswer, proseFou
   return [lines.length > 0 ? `No line says ${list(words, 'or')}, so that was left out.` : `Nothing in the book says ${list(words, 'or')}.`];
 }
 
-function remarkOnNothing({ terms }: ReadQuery, { lines, namesLine, elsewhere }: LinesAnswer): string[] {
+function remarkOnNothing({ terms }: ReadQuery, { lines, namesLine, elsewhere, subjectTerms }: LinesAnswer): string[] {
   if (!namesLine || lines.length > 0) return [];
-  const codes = terms.flatMap(codeWords);
+  const codes = terms.filter((term) => !subjectTerms.includes(term)).flatMap(codeWords);
   if (codes.length === 0) return [];
-  const words = terms.filter(({ kind }) => kind === 'word').map(({ written }) => `“${written}”`);
+  const words = terms.filter((term) => term.kind === 'word' || subjectTerms.includes(term)).map(({ written }) => `“${written}”`);
   const where = words.length === 0 ? '' : ` together with ${list(words, 'and')}`;
   const offer = elsewhere.length > 0 ? ' Below is what is there instead.' : '';
   return [`No line of the book has ${list(codes, 'and')}${where}. None that is merely near is shown.${offer}`];

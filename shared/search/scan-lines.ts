@@ -31,6 +31,8 @@ export interface Scan {
   namesOnlySubject(required: number): boolean;
   /** True where a term is part of a subject's own name, other than the donor on the bench. */
   namesOtherSubject(): boolean;
+  /** The terms that are part of any subject's name. */
+  readonly subjectTerms: number;
   /** Named blocks that the given terms lead to, those of the bench first. */
   holdersNamed(terms: number): readonly number[];
   /**
@@ -226,7 +228,8 @@ export function createScan(index: LinesIndex, terms: readonly QueryTerm[], found
     return { lines: [...holding, ...setBack.lines], count, inLine };
   }
 
-  return { namesOnlySubject, namesOtherSubject, holdersNamed, run };
+  const subjectTerms = subjects.reduce((terms_, _, subject) => terms_ | subjectMask(subject), 0) & lowHalf;
+  return { namesOnlySubject, namesOtherSubject, subjectTerms, holdersNamed, run };
 }
 
 /** For each subject, the terms that name one of its connectors. */

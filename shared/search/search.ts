@@ -71,6 +71,8 @@ function order(
   prose: ProseAnswer,
 ): SearchHit[] {
   if (lines.namesSubject === 'only') return [...pageHits, ...sectionHits];
+  // Where no line has what was asked for, the page that might is the next best thing, not a stretch of its text.
+  if (linesFirst && lineHits.length === 0 && lines.elsewhere.length === 0) return [...pageHits, ...sectionHits];
   if (linesFirst) return [...lineHits, ...sectionHits, ...pageHits];
   // Lines that have only some of the words stand behind prose that has all of them.
   if (lines.someWordsOnly && prose.someWordsOnly) return [...sectionHits, ...lineHits, ...pageHits];
