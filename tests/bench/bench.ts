@@ -1,7 +1,9 @@
 import { firstPaintRows } from './first-paint-bench.ts';
 import { growthRows } from './growth-bench.ts';
 import { quickPace, usualPace, type Pace } from './pace.ts';
+import { pageThreadRows } from './page-thread-bench.ts';
 import { parsingRows } from './parsing-bench.ts';
+import { pauseRows } from './pause-bench.ts';
 import { machineWords, tableText } from './print-table.ts';
 import { publishingRows } from './publishing-bench.ts';
 import { renderingRows } from './rendering-bench.ts';
@@ -18,6 +20,8 @@ const groups: Readonly<Record<string, (pace: Pace) => Promise<BenchRow[]>>> = {
   growth: growthRows,
   weight: weightRows,
   'first-paint': firstPaintRows,
+  'page-thread': pageThreadRows,
+  pauses: pauseRows,
 };
 
 /** The groups that were asked for: all, or those after `--only`, parted by commas. */

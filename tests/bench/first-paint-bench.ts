@@ -15,8 +15,16 @@ function firstPaint(browser: Browser, url: string): Promise<number> {
     await devtools.send('Network.emulateNetworkConditions', { offline: false, ...slowLine });
     await devtools.send('Emulation.setCPUThrottlingRate', { rate: slowProcessor });
     await page.goto(url, { waitUntil: 'load' });
-    const painted = await page.evaluate(() => performance.getEntriesByName('first-contentful-paint')[0]?.startTime);
-    if (painted === undefined) throw new Error(`${url} painted nothing`);
+    const painted = await page.evaluate(
+      () =>
+        new Promise<number>((resolve) => {
+          const observer = new PerformanceObserver((entries) => {
+            const [paint] = entries.getEntriesByName('first-contentful-paint');
+            if (paint !== undefined) resolve(paint.startTime);
+          });
+          observer.observe({ type: 'paint', buffered: true });
+        }),
+    );
     return painted;
   });
 }

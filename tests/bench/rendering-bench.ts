@@ -1,10 +1,11 @@
-import { cpSync, mkdtempSync, rmSync } from 'node:fs';
+import { cpSync, mkdtempSync, readFileSync, rmSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import { pathToFileURL } from 'node:url';
 import { renderToString } from 'react-dom/server';
 import { readSettings } from '../../server/config/settings.ts';
 import { openContext } from '../../server/context.ts';
+import { fillTemplate } from '../../server/http/template.ts';
 import { createLocalApi, type Door } from '../../server/local-api.ts';
 import { createMemberStore } from '../../server/members/member-store.ts';
 import type { Member } from '../../shared/members/member.ts';
@@ -32,8 +33,9 @@ async function builtRenderer(): Promise<typeof import('../../src/entry-server.ts
 }
 
 /**
- * A page for a member, who gets no kept one: loading from a real store, the markup, the state for the browser; beside
- * the markup alone of the same tree with everything loaded.
+ * A page for a member, who gets no kept one: loading from a real store, the markup, the state for the browser, the whole
+ * document; beside the markup alone of the same tree with everything loaded. Both are made into bytes, since a string
+ * that React has only put together is not yet one that can be sent.
  */
 export async function renderingRows(pace: Pace): Promise<BenchRow[]> {
   await prepareDemoBook();
@@ -50,22 +52,26 @@ export async function renderingRows(pace: Pace): Promise<BenchRow[]> {
       variant: anyVariant,
       bench: null,
     };
+    const template = readFileSync(join(process.cwd(), 'dist', 'client', 'index.html'), 'utf8');
+    const renderToBytes = async (request: Request): Promise<Buffer> => {
+      const rendered = await render(request, options);
+      if (rendered.kind !== 'page' || rendered.status !== 200) throw new Error(`${request.url} was not rendered`);
+      return Buffer.from(fillTemplate(template, rendered));
+    };
     const rows: BenchRow[] = [];
     for (const path of pages) {
       const request = (): Request => new Request(`http://127.0.0.1${path}`);
       const loaded = await loadSheet(request(), options);
       if (loaded instanceof Response) throw new Error(`${path} is no page`);
-      const once = await render(request(), options);
-      if (once.kind !== 'page' || once.status !== 200) throw new Error(`${path} was not rendered`);
       const times = await sideBySide(
         pace,
         'processor',
-        () => render(request(), options),
-        () => renderToString(loaded.element),
+        () => renderToBytes(request()),
+        () => Buffer.from(renderToString(loaded.element)),
       );
       rows.push({
-        what: `a page rendered for a member: ${path}`,
-        beside: 'renderToString of the same tree alone, everything loaded',
+        what: `a page rendered for a member, to the bytes that are sent: ${path}`,
+        beside: 'renderToString of the same tree alone to bytes, everything loaded',
         measured: milliseconds(times.ours),
         yardstick: milliseconds(times.yardstick),
         ratio: 1 / times.timeRatio,
