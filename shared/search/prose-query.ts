@@ -35,8 +35,11 @@ function partOf(term: QueryTerm, known: ReadonlySet<string>): Part | null {
     case 'word': {
       const { single } = term;
       if (single === null || known.has(single)) {
+        // Wherever the word stands its concept stands too: asking for both would count everything twice.
+        const concepts = term.words.filter((word) => word.startsWith('~'));
+        const words = concepts.length > 0 ? concepts : term.words;
         // A word that is there is not misspelt: only the last one, which may be unfinished, is taken further.
-        return term.last && single !== null ? anyOf(term.words, {}, beginningWith(single)) : anyOf(term.words, {});
+        return anyOf(words, {}, term.last && single !== null ? beginningWith(single) : []);
       }
       if (slipsForgiven(single) === 0) return anyOf(term.words, {}, term.last ? beginningWith(single) : []);
       const likely = swapped(single).filter((variant) => known.has(variant));
