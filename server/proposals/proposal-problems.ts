@@ -90,6 +90,12 @@ export function alreadyThere(address: PageAddress): Problem {
   );
 }
 
+export const addressIsSettled = problem(
+  'wrong-state',
+  'Its address is settled',
+  'The address of a new page can be changed until it is first sent, and that of a published page never. Nothing was changed: withdraw this proposal and propose the text under the other address.',
+);
+
 export function noSuchRevision(base: number, newest: number | null): Problem {
   const there = newest === null ? 'the page has not been published' : `its newest is ${String(newest)}`;
   return problem(

@@ -14,7 +14,7 @@ import type { Result } from '../../shared/lib/result.ts';
 import { accept, refuse } from '../../shared/lib/result.ts';
 import { can } from '../../shared/members/can.ts';
 import type { Actor, Member } from '../../shared/members/member.ts';
-import { reservedSlugs, type PageAddress } from '../../shared/pages/address.ts';
+import type { PageAddress } from '../../shared/pages/address.ts';
 import type { ProposalState } from '../../shared/proposals/proposal.ts';
 import { afterAction, type ProposalAction } from '../../shared/proposals/transitions.ts';
 import { withBookNewlines } from '../../shared/text/newlines.ts';
@@ -27,7 +27,6 @@ import type { PagePublication } from '../pages/page-publication.ts';
 import type { ParsePool } from '../pages/parse-pool-types.ts';
 import { parseProblem } from '../pages/parse-problem.ts';
 import {
-  alreadyThere,
   membersOnly,
   movedMeanwhile,
   noSuchProposal,
@@ -35,12 +34,12 @@ import {
   notADecider,
   notTheAuthor,
   nothingChanged,
-  reservedSlug,
   wrongState,
 } from './proposal-problems.ts';
 import type { ProposalService } from './proposal-service-types.ts';
 import { createProposalReader, createProposalWriter, type ListedProposalRow, type NoteRow } from './proposal-store.ts';
 import { addressOf, createProposalViews, proposalSummary } from './proposal-views.ts';
+import { addressAfter, refusalOfAddress } from './proposed-address.ts';
 import { createProposedTexts, type ProposedText } from './proposed-text.ts';
 import { publishProposal, refusalOfKind } from './publish-proposal.ts';
 import { startView } from './start-view.ts';
@@ -187,13 +186,9 @@ export function createProposalService(dependencies: ProposalServiceDependencies)
       const { shelf, subject, page, baseRevision, summary } = asked.value;
       const markdown = withBookNewlines(asked.value.markdown);
       const address = { shelf, subject, page };
-      for (const field of ['subject', 'page'] as const) {
-        if ((reservedSlugs as readonly string[]).includes(address[field]))
-          return refuse(reservedSlug(field, address[field]));
-      }
-      const refusal = refusalOfBase(address, baseRevision);
+      const refusal =
+        refusalOfBase(address, baseRevision) ?? refusalOfAddress(address, baseRevision, publication);
       if (refusal !== null) return refuse(refusal);
-      if (baseRevision === null && publication.standing(address).page !== null) return refuse(alreadyThere(address));
       const proposed = await texts.read(address, markdown, actor.id);
       const id = newId();
       const at = now().toISOString();
@@ -225,7 +220,9 @@ export function createProposalService(dependencies: ProposalServiceDependencies)
       const { member, row } = admitted.value;
       const { baseRevision, summary } = admitted.value.body;
       const markdown = withBookNewlines(admitted.value.body.markdown);
-      const address = addressOf(row);
+      const settled = addressAfter(row, admitted.value.body, publication);
+      if (!settled.ok) return settled;
+      const address = settled.value;
       const refusal = refusalOfBase(address, baseRevision);
       if (refusal !== null) return refuse(refusal);
       const proposed = await texts.read(address, markdown, member.id);
@@ -237,7 +234,8 @@ export function createProposalService(dependencies: ProposalServiceDependencies)
         return write(admitted.value, 'revise', null, (writing, at) => {
           writer.putDraft(writing, { ...text, createdAt: at });
           // What was sent before stays what the ledger says of it, until this is sent.
-          writer.change(writing, id, { ...(state === 'draft' ? shown : {}), updatedAt: at });
+          const { subject, page } = address;
+          writer.change(writing, id, { ...(state === 'draft' ? { ...shown, subject, page } : {}), updatedAt: at });
         });
       }
       const newest = reader.versions(id).at(-1);

@@ -135,7 +135,7 @@ export type ProposalReader = ReturnType<typeof createProposalReader>;
 export type ListedProposalRow = NonNullable<ReturnType<ProposalReader['proposal']>>;
 
 /** What changes of a proposal's row as it goes its way. */
-export type ProposalChange = Partial<Omit<ProposalRow, 'id' | 'shelf' | 'subject' | 'page' | 'authorId' | 'createdAt'>>;
+export type ProposalChange = Partial<Omit<ProposalRow, 'id' | 'shelf' | 'authorId' | 'createdAt'>>;
 
 /** Writes proposals; every method asks for an open transaction. */
 export function createProposalWriter({ query }: Database) {

@@ -47,7 +47,14 @@ export const proposeBodySchema = z.object({
   summary,
 });
 
-export const versionBodySchema = z.object({ markdown, summary, baseRevision: revisionNumber.nullable() });
+export const versionBodySchema = z.object({
+  markdown,
+  summary,
+  baseRevision: revisionNumber.nullable(),
+  /** Another address for a page that does not exist yet; only until it is first sent. */
+  subject: slug.optional(),
+  page: slug.optional(),
+});
 export const noteBodySchema = z.object({
   text,
   address: z.string().max(300).optional(),

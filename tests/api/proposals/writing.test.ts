@@ -52,6 +52,22 @@ describe('proposing', () => {
     }
   });
 
+  it('lets a new page move to another address until it is first sent, and never afterwards', async () => {
+    const { proposals, people, propose } = await openBookWithDonor();
+    const { id, state } = await propose(testbike.pinouts, pageText());
+    const text = { markdown: pageText(), summary: 'Moved.', baseRevision: null };
+    const moved = accepted(await proposals.addVersion(people.writer, id, { ...text, page: 'front-connectors' }));
+    expect([moved.page, moved.state]).toEqual(['front-connectors', state]);
+    for (const slug of ['new', 'overview']) {
+      const refusal = refused(await proposals.addVersion(people.writer, id, { ...text, page: slug }));
+      expect(['fields-invalid', 'already-there']).toContain(refusal.code);
+    }
+    accepted(await proposals.send(people.writer, id));
+    const late = refused(await proposals.addVersion(people.writer, id, { ...text, page: 'elsewhere' }));
+    expect(late.code).toBe('wrong-state');
+    expect(accepted(await proposals.proposal(people.writer, id)).page).toBe('front-connectors');
+  });
+
   it('refuses a new page where there is one, and a change of a revision that does not exist', async () => {
     const { proposals, people } = await openBookWithDonor();
     const body = { markdown: overviewText('Other'), summary: 'New' };
