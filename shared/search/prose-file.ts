@@ -1,6 +1,6 @@
 import { formatPageAddress } from '../pages/address.ts';
 import type { LinesIndex } from './lines-index.ts';
-import type { ProsePage } from './prose-index.ts';
+import type { ProsePage } from './prose-page.ts';
 import { proseVersion } from './prose-options.ts';
 import type { SearchDocument } from './search-document.ts';
 
@@ -33,19 +33,6 @@ function packProse({ address, summary, hazards, sections }: SearchDocument): Pac
 /** True where a value that came over the wire is a prose file of this version. */
 export function isProseFile(value: unknown): value is ProseFile {
   return typeof value === 'object' && value !== null && 'version' in value && value.version === proseVersion && 'pages' in value;
-}
-
-/** One page for the prose index, from its document. */
-export function prosePageOf({ address, title, subjectTitle, summary, hazards, sections }: SearchDocument): ProsePage {
-  return {
-    key: formatPageAddress(address),
-    title,
-    subjectTitle,
-    summary,
-    cautions: hazards.map(({ text }) => text),
-    opening: sections.find(({ id }) => id === '')?.text ?? '',
-    sections: sections.filter(({ id }) => id !== ''),
-  };
 }
 
 /** The pages of a book for the prose index: titles and headings from the lines, the rest from the prose where it is there. */

@@ -1,22 +1,9 @@
 import MiniSearch, { type SearchResult } from 'minisearch';
-import { prosePageOf } from './prose-file.ts';
 import { proseOptions, proseWords, type ProseEntry } from './prose-options.ts';
+import { prosePageOf, type ProsePage } from './prose-page.ts';
 import { proseQuery } from './prose-query.ts';
 import type { ReadQuery } from './read-query.ts';
 import type { SearchDocument } from './search-document.ts';
-
-/** A page as the prose index takes it. */
-export interface ProsePage {
-  /** `donors/qf550/quirks`. */
-  readonly key: string;
-  readonly title: string;
-  readonly subjectTitle: string;
-  /** Null while only titles and headings are known. */
-  readonly summary: string | null;
-  readonly cautions: readonly (string | null)[];
-  readonly opening: string;
-  readonly sections: readonly { readonly id: string; readonly heading: string; readonly text: string }[];
-}
 
 /** A section or page that answers; `section` is null for a page. */
 export interface ProseFound {

@@ -1,6 +1,7 @@
 import { isLinesFile, openLinesIndex, type LinesIndex } from '../../../shared/search/lines-index.ts';
 import { isProseFile, prosePages } from '../../../shared/search/prose-file.ts';
-import { createProseIndex, type ProseIndex, type ProsePage } from '../../../shared/search/prose-index.ts';
+import { createProseIndex, type ProseIndex } from '../../../shared/search/prose-index.ts';
+import type { ProsePage } from '../../../shared/search/prose-page.ts';
 import { search } from '../../../shared/search/search.ts';
 import type { SearchView } from '../../../shared/contracts/views.ts';
 import type { IndexFiles, Question } from './worker-messages.ts';
