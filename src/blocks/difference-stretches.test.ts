@@ -13,12 +13,19 @@ function line(
 
 describe('the stretches of a comparison', () => {
   it('fold away what is far from any change and keep its neighbours in sight', () => {
-    const lines = [1, 2, 3, 4, 5, 6, 7, 8, 9].map((number) => line(number, number === 5 ? 'changed' : 'same'));
+    const lines = Array.from({ length: 15 }, (_, index) => line(index + 1, index === 7 ? 'changed' : 'same'));
     expect(stretchesOf(lines, 2).map(({ kind, lines: held }) => [kind, held.map(({ toLine }) => toLine)])).toEqual([
-      ['folded', [1, 2]],
-      ['text', [3, 4, 5, 6, 7]],
-      ['folded', [8, 9]],
+      ['folded', [1, 2, 3, 4, 5]],
+      ['text', [6, 7, 8, 9, 10]],
+      ['folded', [11, 12, 13, 14, 15]],
     ]);
+  });
+
+  it('leave a short run open, which its fold would not make shorter', () => {
+    const lines = Array.from({ length: 9 }, (_, index) =>
+      line(index + 1, index === 0 || index === 8 ? 'added' : 'same'),
+    );
+    expect(stretchesOf(lines, 2).map(({ kind }) => kind)).toEqual(['text']);
   });
 
   it('keep the rows of a table together and apart from the text', () => {

@@ -10,6 +10,9 @@ export interface Stretch {
   readonly lines: readonly LineChange[];
 }
 
+/** Unchanged lines that are not worth folding away. */
+const longestUnfolded = 3;
+
 /** Parts a comparison into stretches; unchanged lines further than `around` from any change are folded away. */
 export function stretchesOf(lines: readonly LineChange[], around: number): Stretch[] {
   const near = nearChanges(lines, around);
@@ -31,7 +34,21 @@ function nearChanges(lines: readonly LineChange[], around: number): boolean[] {
     for (let at = Math.max(0, index - around); at <= Math.min(lines.length - 1, index + around); at += 1)
       near[at] = true;
   });
-  return near;
+  return unfoldShort(near);
+}
+
+/** A run so short that its fold would take as much room as its lines stays open. */
+function unfoldShort(near: readonly boolean[]): boolean[] {
+  const open = [...near];
+  let from = 0;
+  while (from < open.length) {
+    const to = open.indexOf(true, from);
+    const end = to < 0 ? open.length : to;
+    const whole = from === 0 && end === open.length;
+    if (!whole && end - from <= longestUnfolded) open.fill(true, from, end);
+    from = end + 1;
+  }
+  return open;
 }
 
 /** The cells of a table's row, each with its words; a row's words carry ` | ` between the cells. */

@@ -19,12 +19,20 @@ const places: Readonly<Record<string, Place>> = {
   bars: { at: [140, 64], balloon: [122, 34] },
   tank: { at: [186, 92], balloon: [196, 34] },
   'under the seat': { at: [262, 106], balloon: [282, 34] },
-  tail: { at: [348, 118], balloon: [370, 34] },
   'engine right': { at: [178, 160], balloon: [44, 266] },
   'engine left': { at: [206, 194], balloon: [146, 266] },
   'left side cover': { at: [244, 146], balloon: [248, 266] },
   'right side cover': { at: [266, 142], balloon: [352, 266] },
+  tail: { at: [348, 118], balloon: [370, 34] },
 };
+
+const alongTheBike = Object.keys(places);
+
+/** How far along the bike a zone stands, counted from the front; past all others where the drawing does not know it. */
+export function placeAlong(zone: string): number {
+  const at = alongTheBike.indexOf(zone.toLowerCase());
+  return at < 0 ? alongTheBike.length : at;
+}
 
 /** Where each zone's list begins on the sheet. */
 export function zoneAnchor(zone: string): string {

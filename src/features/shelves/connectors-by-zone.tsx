@@ -5,7 +5,7 @@ import type { SubjectAddress } from '../../../shared/pages/address.ts';
 import { FaceThumbnail } from '../../blocks/face-thumbnail.tsx';
 import { counted } from '../../blocks/words.ts';
 import { paths } from '../../lib/paths.ts';
-import { BikeZones, zoneAnchor } from './bike-zones.tsx';
+import { BikeZones, placeAlong, zoneAnchor } from './bike-zones.tsx';
 
 type Connector = SubjectView['connectors'][number];
 
@@ -18,7 +18,7 @@ interface ConnectorsByZoneProps {
 /** Every connector as a small face, under the place on the bike where one looks for it. */
 export function ConnectorsByZone({ subject, connectors, pages }: ConnectorsByZoneProps): ReactElement {
   const titles = new Map(pages.map(({ page, title }) => [page, title]));
-  const zones = [...zonesOf(connectors)];
+  const zones = zonesOf(connectors);
   return (
     <div className="zones">
       {subject.shelf === 'donors' ? (
@@ -56,13 +56,12 @@ export function ConnectorsByZone({ subject, connectors, pages }: ConnectorsByZon
 /** For connectors whose page does not say where on the bike they are. */
 const unplaced = 'nobody has said where';
 
-/** The connectors zone by zone, in the order in which the pages name them; those without a zone last. */
-function zonesOf(connectors: readonly Connector[]): Map<string, Connector[]> {
+/** The connectors zone by zone, from the front of the bike to its tail; what the drawing does not know comes last. */
+function zonesOf(connectors: readonly Connector[]): [string, Connector[]][] {
   const zones = new Map<string, Connector[]>();
-  const placed = connectors.filter(({ zone }) => zone !== null);
-  for (const connector of [...placed, ...connectors.filter(({ zone }) => zone === null)]) {
+  for (const connector of connectors) {
     const name = connector.zone ?? unplaced;
     zones.set(name, [...(zones.get(name) ?? []), connector]);
   }
-  return zones;
+  return [...zones].toSorted(([a], [b]) => placeAlong(a) - placeAlong(b));
 }
