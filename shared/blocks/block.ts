@@ -27,6 +27,8 @@ export interface Line {
   readonly line: number;
   readonly applies: Applicability;
   readonly cells: readonly string[];
+  /** What the row has beyond the last heading, where it has too many cells: shown, and not read. */
+  readonly strayCells?: readonly string[];
   readonly note: string | null;
   /** The id of the source: the row's own, else its block's. */
   readonly cite: string | null;

@@ -44,6 +44,7 @@ export function readCommonCells<Role extends string>(
     cells: columns.map((_, at) => row.cells[at] ?? ''),
     note: cellText(cellOf(columns, row, 'note')),
     cite: cellText(cellOf(columns, row, 'cite')) ?? blockCite,
+    ...(row.cells.length > columns.length ? { strayCells: row.cells.slice(columns.length) } : {}),
   };
   return { common, unreadableYears };
 }
@@ -61,7 +62,7 @@ export function checkRow(
     findings.push(finding('block-unreadable', message, row.line, `#${address}`));
   }
   if (row.cells.slice(table.headings.length).some((cell) => cell !== '')) {
-    const message = `This row has ${row.cells.length} cells under ${table.headings.length} headings, so its last is lost. Write a | inside a cell as \\|.`;
+    const message = `This row has ${row.cells.length} cells under ${table.headings.length} headings, so nothing says what its last is. Write a | inside a cell as \\|.`;
     findings.push(finding('block-unreadable', message, row.line, `#${address}`));
   }
   return findings;

@@ -1,13 +1,12 @@
 import type { Root } from 'mdast';
+import { remark } from 'remark';
 import remarkDirective from 'remark-directive';
 import remarkFrontmatter from 'remark-frontmatter';
 import remarkGfm from 'remark-gfm';
-import remarkParse from 'remark-parse';
-import { unified, type Processor } from 'unified';
+import type { Processor } from 'unified';
 import { ownDirectivesOnly } from './own-directives.ts';
 
-const base = unified()
-  .use(remarkParse)
+const base = remark()
   // A single `~` is a range (13.8~14.6 V), not strikethrough.
   .use(remarkGfm, { singleTilde: false })
   .use(remarkFrontmatter, ['yaml'])

@@ -26,7 +26,7 @@ export function renderTable(block: TableBlock, context: RenderContext, seats: Re
     return `${openTag('th', { scope: 'col', id: contact, class: cellClass(column.role) })}${escapeHtml(column.heading)}</th>`;
   });
   const lines = block.lines.map((line) => ({ line: line.line, html: renderLine(block, line, shown, context, seats) }));
-  const unread = (block.unreadRows ?? []).map((row) => ({ line: row.line, html: renderUnread(row, shown) }));
+  const unread = (block.unreadRows ?? []).map((row) => ({ line: row.line, html: renderUnread(row, shown, columns.length) }));
   const rows = [...lines, ...unread].toSorted((a, b) => a.line - b.line).map(({ html }) => html);
   return `<table class="lines"><thead><tr>${heads.join('')}<th scope="col" class="cell-mark">Mark</th></tr></thead><tbody>${rows.join('')}</tbody></table>`;
 }
@@ -70,8 +70,9 @@ function renderLine(
     const name = leads ? 'th' : 'td';
     return `${openTag(name, attributes)}${renderCell(block, line, column.role, cell, context)}</${name}>`;
   });
+  const further = renderStray(line.strayCells ?? []);
   const reason = why === null ? '' : ` <span class="why">${escapeHtml(why)}</span>`;
-  return `${row}${cells.join('')}<td class="cell-mark" data-label="Mark">${renderMark(line, context)}${reason}</td></tr>`;
+  return `${row}${cells.join('')}${further}<td class="cell-mark" data-label="Mark">${renderMark(line, context)}${reason}</td></tr>`;
 }
 
 function renderCell(block: TableBlock, line: TableLine, role: AnyRole | null, cell: string, context: RenderContext): string {
@@ -85,11 +86,20 @@ function renderCell(block: TableBlock, line: TableLine, role: AnyRole | null, ce
   return escapeHtml(cell);
 }
 
-function renderUnread({ cells }: SourceTableRow, shown: readonly ShownColumn[]): string {
+function renderUnread({ cells }: SourceTableRow, shown: readonly ShownColumn[], columns: number): string {
   const written = shown.map(
     ({ column, at }) => `${openTag('td', { 'data-label': column.heading })}${escapeHtml(cells[at] ?? '')}</td>`,
   );
-  return `<tr class="unread-row">${written.join('')}<td class="cell-mark" data-label="Mark"><span class="mark mark-unread">not read</span></td></tr>`;
+  const further = renderStray(cells.slice(columns));
+  return `<tr class="unread-row">${written.join('')}${further}<td class="cell-mark" data-label="Mark"><span class="mark mark-unread">not read</span></td></tr>`;
+}
+
+/** What a row has beyond the last heading: shown, though nothing says what it is. */
+function renderStray(cells: readonly string[]): string {
+  return cells
+    .filter((cell) => cell.trim() !== '')
+    .map((cell) => `<td class="stray">${escapeHtml(cell)}</td>`)
+    .join('');
 }
 
 function cellClass(role: AnyRole | null): string {

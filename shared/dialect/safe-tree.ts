@@ -19,7 +19,7 @@ const schema: Schema = {
       'href', 'title', 'ariaLabel', 'dataFootnoteRef', 'dataFootnoteBackref', ['id', /^note-fnref-/],
       ['ariaDescribedBy', 'footnote-label'], ['className', 'data-footnote-backref'],
     ],
-    code: [['className', /^language-[\w-]{1,40}$/]],
+    code: [['className', /^language-./]],
     div: [['dataBlock', /^\d+$/], ['className', 'unread']],
     h1: [['dataOutline', /^\d+$/]],
     h2: [['dataOutline', /^\d+$/], ['id', 'footnote-label'], ['className', 'notes-label']],
@@ -51,7 +51,7 @@ const processor = unified()
     footnoteLabelProperties: { className: ['notes-label'] },
     footnoteBackLabel: (reference, again) => `Back to where note ${reference + 1} is named${again > 1 ? `, ${again}` : ''}`,
   })
-  .use(() => keepOwnImages)
+  .use(() => settleAddresses)
   .use(rehypeSanitize, schema)
   .freeze();
 
@@ -67,24 +67,32 @@ export function safeTree(tree: Root, outline: readonly OutlineEntry[]): HtmlRoot
 
 const ownPhoto = /^\/photos\/[0-9a-f]{64}\.webp$/;
 
-/** Only the book's own photographs are shown; an image from elsewhere becomes its words, as a link where none is around. */
-function keepOwnImages(tree: HtmlRoot): void {
-  for (const child of tree.children) replaceImages(child, false);
+/**
+ * Only the book's own photographs are shown; an image from elsewhere becomes its words, as a link where none is around.
+ * Schemes are written in small letters, as the list of safe ones has them.
+ */
+function settleAddresses(tree: HtmlRoot): void {
+  for (const child of tree.children) settleIn(child, false);
 }
 
-function replaceImages(node: HtmlContent, insideLink: boolean): void {
+function settleIn(node: HtmlContent, insideLink: boolean): void {
   if (node.type !== 'element') return;
-  const { src, alt } = node.properties;
-  if (node.tagName !== 'img' || typeof src !== 'string') {
-    for (const child of node.children) replaceImages(child, insideLink || node.tagName === 'a');
-    return;
+  const { properties, tagName } = node;
+  if (tagName === 'img') settleImage(node, insideLink);
+  if (typeof properties['href'] === 'string') {
+    properties['href'] = properties['href'].replace(/^[a-z][a-z0-9+.-]*:/i, (scheme) => scheme.toLowerCase());
   }
-  if (ownPhoto.test(src)) return;
+  for (const child of node.children) settleIn(child, insideLink || tagName === 'a');
+}
+
+function settleImage(image: Element, insideLink: boolean): void {
+  const { src, alt, title } = image.properties;
+  if (typeof src !== 'string' || ownPhoto.test(src)) return;
   const words = typeof alt === 'string' && alt.trim() !== '' ? alt : src;
   const text: ElementContent = { type: 'text', value: words };
-  node.tagName = insideLink ? 'span' : 'a';
-  node.properties = insideLink ? {} : { href: src };
-  node.children = [text];
+  image.tagName = insideLink ? 'span' : 'a';
+  image.properties = insideLink ? {} : title === undefined ? { href: src } : { href: src, title };
+  image.children = [text];
 }
 
 /** Anchors, links that lead away, images that wait, headings below the page's own. */
