@@ -96,20 +96,3 @@ export function SelectField({
     </select>,
   );
 }
-
-interface CheckFieldProps extends Omit<InputHTMLAttributes<HTMLInputElement>, 'type'> {
-  readonly label: ReactNode;
-  /** One of several that exclude each other, where they share a name. */
-  readonly kind?: 'checkbox' | 'radio';
-}
-
-/** A box to tick, with its words as part of the target. */
-export function CheckField({ label, kind = 'checkbox', className, ...rest }: CheckFieldProps): ReactElement {
-  const id = useId();
-  return (
-    <div className={classNames('check-field', className)}>
-      <input type={kind} id={id} {...rest} />
-      <label htmlFor={id}>{label}</label>
-    </div>
-  );
-}

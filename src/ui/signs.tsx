@@ -80,40 +80,11 @@ export function MemberSign(): ReactElement {
   );
 }
 
-/** A plate turned over on its own edge. */
-export function TurnOverSign(): ReactElement {
-  return (
-    <Sign>
-      <path d="M12 3v18" strokeDasharray="2 3.2" />
-      <path d="M9 7H4v10h5M15 7h5v10h-5M8 20.500c2.5 1.5 5.5 1.5 8 0M16 20.500l-2.5-.6M16 20.500l-.4 2.4" />
-    </Sign>
-  );
-}
-
-/** A wire that leads on. */
-export function FollowSign(): ReactElement {
-  return (
-    <Sign>
-      <circle cx="4.5" cy="6" r="2" />
-      <path d="M6.5 6H12v12h8M17 15l3 3-3 3" />
-    </Sign>
-  );
-}
-
 /** A sheet coming out of its slot. */
 export function PrintSign(): ReactElement {
   return (
     <Sign>
       <path d="M2.5 10h19M6 10V3h12v7M6 10v11h12V10M9 14h6M9 17h6" />
-    </Sign>
-  );
-}
-
-/** A stamp on its line. */
-export function MarkSign(): ReactElement {
-  return (
-    <Sign>
-      <path d="M3 5h18v11H3zM3 20.500h18M8 10.500l3 3 5.5-6" />
     </Sign>
   );
 }
