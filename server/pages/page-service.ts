@@ -32,6 +32,8 @@ const lastRevisionsShown = 3;
 /** Revisions of one page that its history lists. */
 const revisionsListed = 500;
 const differencesKept = 50;
+/** Their HTML is the one that page-texts.ts keeps as well. */
+const viewsKept = 200;
 
 export interface PageServiceDependencies {
   readonly database: Database;
@@ -64,6 +66,7 @@ export function createPageService(dependencies: PageServiceDependencies): PageSe
   const texts = createPageTexts(database, reader, publication, parsePool);
   const differences = createRecent<string, Difference>(differencesKept);
   const lists = createPageLists(reader);
+  const views = createRecent<string, PageView>(viewsKept);
 
   function refuseReading(actor: Actor): Problem | null {
     if (can(actor, 'read', { reading })) return null;
@@ -129,15 +132,31 @@ export function createPageService(dependencies: PageServiceDependencies): PageSe
     };
   }
 
+  /** A revision as a reader of a variant sees it: made once, and kept until something of its subject is published. */
   async function viewRevision(
     address: PageAddress,
     number: number | null,
     variant: Variant,
   ): Promise<Result<PageView, Problem>> {
-    const found = find(address, number);
+    const found = reader.page(address);
     if (found === null) return refuse(noSuchPage);
-    const text = await texts.text(address, found.page, found.revision);
-    return accept(pageView(address, found, text, variant));
+    const { page, subject } = found;
+    const key = JSON.stringify([
+      page.id,
+      number ?? page.publishedRevision,
+      subject.version,
+      variant.year,
+      variant.market,
+      variant.frame,
+    ]);
+    const kept = views.get(key);
+    if (kept !== undefined) return accept(kept);
+    const revision = reader.revision(page.id, number ?? page.publishedRevision);
+    if (revision === null) return refuse(noSuchPage);
+    const text = await texts.text(address, page, revision);
+    const view = pageView(address, { page, subject, revision }, text, variant);
+    views.set(key, view);
+    return accept(view);
   }
 
   function compare(from: RevisionRow, to: RevisionRow): Difference {
