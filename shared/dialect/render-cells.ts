@@ -1,5 +1,7 @@
 import type { Line, WrittenColour } from '../blocks/block.ts';
-import { namesIn, saysNothing } from '../blocks/cell-text.ts';
+import { saysNothing } from '../blocks/cell-text.ts';
+import { citedIds } from '../blocks/check-sources.ts';
+import { isCited } from '../blocks/cited.ts';
 import { readTerminalName } from '../blocks/terminal-name.ts';
 import { drawingMarkup } from '../drawing/drawing.ts';
 import { drawWire } from '../drawing/draw-wire.ts';
@@ -63,12 +65,13 @@ export function renderEarthedBy(cell: string, context: RenderContext): string {
 }
 
 /** How far a line may be trusted, as a stamp in words: cited where a factory manual or a standard says so. */
-export function renderMark({ cite }: Line, context: RenderContext): string {
-  const sources = namesIn(cite ?? '').flatMap((id) => context.sources.get(id) ?? []);
-  const isCited = sources.some(({ kind }) => kind === 'factory-manual' || kind === 'standard');
-  const word = isCited ? 'cited' : 'unchecked';
-  const title = sources.map(({ title: name, where }) => (where === null ? name : `${name}, ${where}`)).join('; ');
-  return `${openTag('span', { class: `mark mark-${word}`, title: title === '' ? null : title })}${word}</span>`;
+export function renderMark({ cite }: Line, { sources }: RenderContext): string {
+  const word = isCited(cite, sources) ? 'cited' : 'unchecked';
+  const ids = citedIds(cite);
+  const titles = sources.flatMap(({ id, title, where }) => {
+    return ids.includes(id) ? [where === null ? title : `${title}, ${where}`] : [];
+  });
+  return `${openTag('span', { class: `mark mark-${word}`, title: titles.length === 0 ? null : titles.join('; ') })}${word}</span>`;
 }
 
 /** Why a line is set back for the bike that was chosen; null where it is not. */

@@ -8,7 +8,7 @@ import type { PageText } from './page-text.ts';
 /** What the rendering of one page knows everywhere. */
 export interface RenderContext {
   readonly variant: Variant;
-  readonly sources: ReadonlyMap<string, Source>;
+  readonly sources: readonly Source[];
   /** Where a terminal stands on this page, as an address; null where it does not. */
   placeOf(name: TerminalName): string | null;
   /** Gives an id back the first time that it is asked for, null after: a page has each id once. */
@@ -24,7 +24,7 @@ export function createRenderContext({ blocks, frontMatter, outline }: PageText, 
   const used = new Set(outline.map(({ id }) => id));
   return {
     variant,
-    sources: new Map(frontMatter.sources.map((source) => [source.id, source])),
+    sources: frontMatter.sources,
     placeOf(name) {
       // A component's terminals have no lines of their own: its own line stands for them.
       return places.get(formatTerminalName(name)) ?? (components.has(name.id) ? (places.get(name.id) ?? null) : null);

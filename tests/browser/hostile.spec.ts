@@ -1,4 +1,4 @@
-import { expect, test } from '@playwright/test';
+import { expect, test, type Page } from '@playwright/test';
 import { readPage } from '../../shared/dialect/read-page.ts';
 import { renderPage } from '../../shared/dialect/render-page.ts';
 import { anyVariant } from '../../shared/pages/applicability.ts';
@@ -14,9 +14,8 @@ function htmlOf(markdown: string): string {
   return page.ok ? renderPage(page.value, { address: null, variant: anyVariant, marks: 'shown' }) : '';
 }
 
-const texts = [...ownLines.map(pageEverywhere), ...ownLines, ...ownPages, ...publishedLines.map(pageEverywhere)];
-
-test('nothing that a member writes runs, opens a dialog, covers the page or asks another site for anything', async ({ page }) => {
+/** What a page did that it should not have done. */
+async function watch(page: Page, pages: readonly string[]): Promise<void> {
   const asked: string[] = [];
   const dialogs: string[] = [];
   const complaints: string[] = [];
@@ -29,21 +28,35 @@ test('nothing that a member writes runs, opens a dialog, covers the page or asks
     void dialog.dismiss();
   });
   page.on('pageerror', (error) => complaints.push(error.message));
-  for (const text of texts) {
-    await page.setContent(`<!doctype html><title>quiet</title><main style="position:relative;z-index:1">${htmlOf(text)}</main>`);
+  for (const markdown of pages) {
+    await page.setContent(`<!doctype html><title>quiet</title><main style="position:relative">${htmlOf(markdown)}</main>`);
     const seen = await page.evaluate(() => {
-      for (const element of document.querySelectorAll<HTMLElement>('main *')) {
-        for (const kind of ['mouseover', 'focus', 'load', 'error', 'toggle', 'animationstart']) {
-          element.dispatchEvent(new Event(kind));
-        }
+      const everything = [...document.querySelectorAll<HTMLElement>('main *')];
+      for (const element of everything) {
+        for (const kind of ['mouseover', 'focus', 'load', 'error']) element.dispatchEvent(new Event(kind));
       }
-      const over = [...document.querySelectorAll('main *')].filter((element) => getComputedStyle(element).position === 'fixed');
+      const over = everything.filter((element) => getComputedStyle(element).position === 'fixed');
       return { title: document.title, over: over.length, frames: window.frames.length, polluted: 'polluted' in {} };
     });
-    expect(seen, text).toEqual({ title: 'quiet', over: 0, frames: 0, polluted: false });
+    expect(seen, markdown).toEqual({ title: 'quiet', over: 0, frames: 0, polluted: false });
   }
   // A photograph of the book's own is the one thing that a page may ask for.
   expect(asked.filter((url) => !/\/photos\/[0-9a-f]{64}\.webp$/.test(url))).toEqual([]);
   expect(dialogs).toEqual([]);
   expect(complaints).toEqual([]);
+}
+
+/** Texts as pages of twenty, each text a paragraph. */
+function inTwenties(texts: readonly string[]): readonly string[] {
+  const pages: string[] = [];
+  for (let at = 0; at < texts.length; at += 20) pages.push(texts.slice(at, at + 20).join('\n\n'));
+  return pages;
+}
+
+test('what a member writes anywhere in a page runs nothing, opens no dialog and asks nobody for anything', async ({ page }) => {
+  await watch(page, ownLines.map(pageEverywhere));
+});
+
+test('whole pages written to do harm run nothing, and neither do the published texts', async ({ page }) => {
+  await watch(page, [...ownPages, ...inTwenties(ownLines), ...inTwenties(publishedLines)]);
 });
