@@ -53,5 +53,11 @@ function sendFile(request: Request, response: Response, file: SearchFile, cacheC
   if (encoding !== 'identity') response.setHeader('Content-Encoding', encoding);
   response.setHeader('Content-Type', jsonType);
   response.setHeader('Content-Length', body.byteLength);
-  response.status(200).end(isReading(request) && request.method !== 'HEAD' ? Buffer.from(body.buffer, body.byteOffset, body.byteLength) : undefined);
+  response
+    .status(200)
+    .end(
+      isReading(request) && request.method !== 'HEAD'
+        ? Buffer.from(body.buffer, body.byteOffset, body.byteLength)
+        : undefined,
+    );
 }

@@ -10,7 +10,13 @@ export type ToSearchWorker =
   | { readonly kind: 'remove'; readonly address: PageAddress }
   /** All changes are in: make the files that browsers fetch. */
   | { readonly kind: 'make files' }
-  | { readonly kind: 'ask'; readonly id: number; readonly query: string; readonly bench: string | null; readonly variant: Variant };
+  | {
+      readonly kind: 'ask';
+      readonly id: number;
+      readonly query: string;
+      readonly bench: string | null;
+      readonly variant: Variant;
+    };
 
 /** What the thread that searches says. */
 export type FromSearchWorker =

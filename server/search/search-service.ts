@@ -73,8 +73,16 @@ export function createSearchService(dependencies: SearchServiceDependencies): Se
   function refusal(actor: Actor): Problem | null {
     if (can(actor, 'read', { reading })) return null;
     return actor === null
-      ? problem('sign-in-needed', 'This book is for members', 'The club keeps its book to its members: sign in to search it.')
-      : problem('not-allowed', 'You may not search this book', 'Your membership is suspended. Ask an administrator of the club.');
+      ? problem(
+          'sign-in-needed',
+          'This book is for members',
+          'The club keeps its book to its members: sign in to search it.',
+        )
+      : problem(
+          'not-allowed',
+          'You may not search this book',
+          'Your membership is suspended. Ask an administrator of the club.',
+        );
   }
 
   function tell(worker: Worker, message: ToSearchWorker): void {

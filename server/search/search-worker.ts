@@ -26,7 +26,11 @@ async function take(message: ToSearchWorker): Promise<void> {
       try {
         say({ kind: 'answer', id: message.id, view: book.search(message.query, message.bench, message.variant) });
       } catch (failure) {
-        say({ kind: 'failed', id: message.id, stack: failure instanceof Error ? (failure.stack ?? failure.message) : String(failure) });
+        say({
+          kind: 'failed',
+          id: message.id,
+          stack: failure instanceof Error ? (failure.stack ?? failure.message) : String(failure),
+        });
       }
   }
 }

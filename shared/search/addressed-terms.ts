@@ -22,7 +22,8 @@ export function addressedTerm(
 ): Addressed {
   const isTerminal = endIds.places.some(
     (place, end) =>
-      endIds.values[place] === id && (endTerminals.values[endTerminals.places[end] ?? 0] ?? '').toLowerCase() === terminal,
+      endIds.values[place] === id &&
+      (endTerminals.values[endTerminals.places[end] ?? 0] ?? '').toLowerCase() === terminal,
   );
   const subjects = new Set(holders.filter((holder) => holder.id === id).map(({ page }) => pages[page]?.subject ?? 0));
   return { bit, id, terminal, isTerminal, subjects };

@@ -45,7 +45,12 @@ export function endsOf({ endStart, endIds, endTerminals }: LinesIndex, line: num
  * @param prose where the page's own words of a caution are; the book's own stand in until they are there
  * @param variant the one bike that is meant
  */
-export function lineHit(index: LinesIndex, prose: ProseIndex | null, found: LineFound, variant: Variant): SearchHit | null {
+export function lineHit(
+  index: LinesIndex,
+  prose: ProseIndex | null,
+  found: LineFound,
+  variant: Variant,
+): SearchHit | null {
   const holder = index.holders[found.holder];
   const page = holder === undefined ? undefined : index.pages[holder.page];
   if (holder === undefined || page === undefined) return null;
@@ -85,7 +90,10 @@ function lineOf(
     appliesHere: applies.applies,
     hazard: hazardOf(index, page, prose, line),
     // Letters that read as two colours are drawn as both.
-    wireSvg: colour === null || colour.readings.length === 0 ? null : colour.readings.map(drawWire).map(drawingMarkup).join(''),
+    wireSvg:
+      colour === null || colour.readings.length === 0
+        ? null
+        : colour.readings.map(drawWire).map(drawingMarkup).join(''),
     faceSvg: faceMarkup(index, holder, line, variant),
   };
 }
@@ -123,7 +131,14 @@ function whereOf(index: LinesIndex, holder: IndexedHolder, line: number): string
 function circuitOf(index: LinesIndex, holder: IndexedHolder, line: number): string | null {
   const text = holder.kind === 'connector' || holder.kind === 'wires' ? textAt(index.texts, line) : '';
   const state = lineStates[index.states[line] ?? 0];
-  const special = state === 'blank' ? 'empty cavity' : state === 'capped' ? 'live, ends insulated' : state === 'removed' ? 'taken away' : '';
+  const special =
+    state === 'blank'
+      ? 'empty cavity'
+      : state === 'capped'
+        ? 'live, ends insulated'
+        : state === 'removed'
+          ? 'taken away'
+          : '';
   const parts = [text, textAt(index.details, line), special].filter((part) => part !== '');
   return parts.length === 0 ? null : parts.join(', ');
 }
@@ -135,7 +150,12 @@ function goesToOf(index: LinesIndex, holder: IndexedHolder, line: number): strin
   return holder.kind === 'wires' ? (ends[1] ?? null) : ends.join(', ');
 }
 
-function hazardOf(index: LinesIndex, page: IndexedPage, prose: ProseIndex | null, line: number): SearchHitLine['hazard'] {
+function hazardOf(
+  index: LinesIndex,
+  page: IndexedPage,
+  prose: ProseIndex | null,
+  line: number,
+): SearchHitLine['hazard'] {
   const place = (index.hazard[line] ?? 0) - 1;
   const hazard = page.hazards[place];
   if (hazard === undefined) return null;

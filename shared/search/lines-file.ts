@@ -8,22 +8,13 @@ import {
   wireAddress,
 } from '../blocks/line-address.ts';
 import { shelves } from '../pages/address.ts';
-import type { Applicability } from '../pages/applicability.ts';
 import { pageKinds } from '../pages/page-kind.ts';
 import { slugOf } from '../lib/slug.ts';
-import { colourNames } from '../wire-colours/colour-system.ts';
 import { packNumbers, type PackedNumbers } from './packed-numbers.ts';
 import { onOneLine, packStrings, placesIn, type PackedStrings } from './packed-strings.ts';
+import { formatApplicability, formatColour, formatFace, formatHazard } from './packed-values.ts';
 import { bothOf, repeated } from './recent-values.ts';
-import {
-  holderKinds,
-  lineStates,
-  type HolderKind,
-  type IndexedColour,
-  type SearchDocument,
-  type SearchFace,
-  type SearchLine,
-} from './search-document.ts';
+import { holderKinds, lineStates, type HolderKind, type SearchDocument, type SearchLine } from './search-document.ts';
 
 /** Raised whenever the file's shape changes, so that an old page in a browser asks for a new program, not for nonsense. */
 export const linesVersion = 1;
@@ -34,7 +25,12 @@ export const linesVersion = 1;
  */
 export interface LinesFile {
   readonly version: typeof linesVersion;
-  readonly subjects: { readonly count: number; readonly shelves: PackedNumbers; readonly slugs: string; readonly titles: string };
+  readonly subjects: {
+    readonly count: number;
+    readonly shelves: PackedNumbers;
+    readonly slugs: string;
+    readonly titles: string;
+  };
   readonly pages: {
     readonly count: number;
     readonly subjects: PackedNumbers;
@@ -128,7 +124,12 @@ export function buildLinesFile(documents: readonly SearchDocument[]): LinesFile 
   for (const { address, subjectTitle } of documents) {
     const key = `${address.shelf}/${address.subject}`;
     if (subjects.has(key)) continue;
-    subjects.set(key, { place: subjects.size, shelf: shelves.indexOf(address.shelf), slug: address.subject, title: onOneLine(subjectTitle) });
+    subjects.set(key, {
+      place: subjects.size,
+      shelf: shelves.indexOf(address.shelf),
+      slug: address.subject,
+      title: onOneLine(subjectTitle),
+    });
   }
   const subjectList = [...subjects.values()];
   const headings = documents.flatMap(({ sections }) => sections.filter(({ id }) => id !== ''));
@@ -144,7 +145,9 @@ export function buildLinesFile(documents: readonly SearchDocument[]): LinesFile 
     },
     pages: {
       count: documents.length,
-      subjects: packNumbers(documents.map(({ address }) => subjects.get(`${address.shelf}/${address.subject}`)?.place ?? 0)),
+      subjects: packNumbers(
+        documents.map(({ address }) => subjects.get(`${address.shelf}/${address.subject}`)?.place ?? 0),
+      ),
       slugs: packStrings(documents.map(({ address }) => address.page)),
       titles: packStrings(documents.map(({ title }) => title)),
       kinds: packNumbers(documents.map(({ kind }) => pageKinds.indexOf(kind))),
@@ -158,15 +161,27 @@ export function buildLinesFile(documents: readonly SearchDocument[]): LinesFile 
     },
     hazards: {
       counts: packNumbers(documents.map((document) => document.hazards.length)),
-      kinds: packStrings(hazards.map(({ signal, kind }) => `${signal} ${kind}`)),
+      kinds: packStrings(hazards.map(formatHazard)),
     },
     holders: {
       count: holders.length,
       kinds: packNumbers(holders.map(({ kind }) => holderKinds.indexOf(kind))),
-      ids: packStrings(holders.map(({ id }) => id), ['']),
-      names: packStrings(holders.map(({ name }) => name), ['']),
-      zones: packStrings(holders.map(({ zone }) => zone), ['']),
-      faces: packStrings(holders.map(({ face }) => formatFace(face)), ['']),
+      ids: packStrings(
+        holders.map(({ id }) => id),
+        [''],
+      ),
+      names: packStrings(
+        holders.map(({ name }) => name),
+        [''],
+      ),
+      zones: packStrings(
+        holders.map(({ zone }) => zone),
+        [''],
+      ),
+      faces: packStrings(
+        holders.map(({ face }) => formatFace(face)),
+        [''],
+      ),
       lines: packNumbers(holders.map(({ lines }) => lines.length)),
     },
     lines: packLines(documents),
@@ -199,21 +214,51 @@ function packLines(documents: readonly SearchDocument[]): LinesFile['lines'] {
   const texts = lines.map(({ text }) => text);
   const endIds = ends.map(({ id }) => id);
   const text = placesIn(texts, ['']);
-  const holderIds = placesIn(documents.flatMap(({ holders }) => holders.map(({ id }) => id)), ['']);
-  const place = placeContexts(text, repeated(holderIds, documents.flatMap(({ holders }) => holders.map((holder) => holder.lines.length))));
-  const end = repeated(place, lines.map(({ goesTo }) => goesTo.length));
+  const holderIds = placesIn(
+    documents.flatMap(({ holders }) => holders.map(({ id }) => id)),
+    [''],
+  );
+  const place = placeContexts(
+    text,
+    repeated(
+      holderIds,
+      documents.flatMap(({ holders }) => holders.map((holder) => holder.lines.length)),
+    ),
+  );
+  const end = repeated(
+    place,
+    lines.map(({ goesTo }) => goesTo.length),
+  );
   return {
     count: lines.length,
     own: packNumbers(own),
     names: packStrings(names),
     texts: packStrings(texts, ['']),
-    details: packStrings(lines.map(({ detail }) => detail), ['']),
-    colours: packStrings(lines.map(({ colour }) => formatColour(colour)), [''], text),
-    sizes: packStrings(lines.map(({ size }) => size ?? ''), [''], text),
+    details: packStrings(
+      lines.map(({ detail }) => detail),
+      [''],
+    ),
+    colours: packStrings(
+      lines.map(({ colour }) => formatColour(colour)),
+      [''],
+      text,
+    ),
+    sizes: packStrings(
+      lines.map(({ size }) => size ?? ''),
+      [''],
+      text,
+    ),
     ends: packNumbers(lines.map(({ goesTo }) => goesTo.length)),
     endIds: packStrings(endIds, [], end),
-    endTerminals: packStrings(ends.map(({ terminal }) => terminal ?? ''), [''], bothOf(end, placesIn(endIds))),
-    applies: packStrings(lines.map(({ applies }) => formatApplicability(applies)), ['']),
+    endTerminals: packStrings(
+      ends.map(({ terminal }) => terminal ?? ''),
+      [''],
+      bothOf(end, placesIn(endIds)),
+    ),
+    applies: packStrings(
+      lines.map(({ applies }) => formatApplicability(applies)),
+      [''],
+    ),
     cited: packNumbers(lines.map(({ cited }) => (cited ? 1 : 0))),
     states: packNumbers(lines.map(({ state }) => lineStates.indexOf(state))),
     hazards: packNumbers(lines.map(({ hazard }) => (hazard === null ? 0 : hazard + 1))),
@@ -224,20 +269,4 @@ function packLines(documents: readonly SearchDocument[]): LinesFile['lines'] {
 /** What a line's ends depend on: its text together with the block that it stands in. */
 export function placeContexts(texts: ArrayLike<number>, holderIds: ArrayLike<number>): Float64Array {
   return bothOf(texts, holderIds);
-}
-
-function formatFace(face: SearchFace | null): string {
-  return face === null ? '' : [face.layout, face.seen, face.first ?? '', face.latch ?? '', face.contacts ?? ''].join('|');
-}
-
-/** `Y/R` and the places of what it may mean: `Y/R 3.2`; a dot and nothing after it is a wire without a tracer. */
-function formatColour(colour: IndexedColour | null): string {
-  if (colour === null) return '';
-  const readings = colour.readings.map(({ base, tracer }) => `${colourNames.indexOf(base)}.${tracer === null ? '' : colourNames.indexOf(tracer)}`);
-  return `${colour.code.replace(/\s+/g, '_')} ${readings.join(',')}`;
-}
-
-function formatApplicability({ years, markets, frames }: Applicability): string {
-  if (years.length + markets.length + frames.length === 0) return '';
-  return JSON.stringify([years.map(({ from, to }) => [from, to]), markets, frames]);
 }

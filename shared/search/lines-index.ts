@@ -1,17 +1,17 @@
-import { hazardKinds, signalWords, type Corner, type FaceSide, type HazardKind, type LatchSide, type SignalWord } from '../blocks/block.ts';
 import { shelves, type PageAddress, type Shelf } from '../pages/address.ts';
-import { appliesToAll, type Applicability } from '../pages/applicability.ts';
+import type { Applicability } from '../pages/applicability.ts';
 import { pageKinds, type PageKind } from '../pages/page-kind.ts';
-import { colourNames } from '../wire-colours/colour-system.ts';
 import { buildLinesFile, linesVersion, nextCavity, placeContexts, usualAnchor, type LinesFile } from './lines-file.ts';
 import { unpackNumbers } from './packed-numbers.ts';
 import { unpackStrings, type StringColumn } from './packed-strings.ts';
+import { parseApplicability, parseColour, parseFace, parseHazard } from './packed-values.ts';
 import {
   holderKinds,
   type HolderKind,
   type IndexedColour,
   type SearchDocument,
   type SearchFace,
+  type SearchHazard,
 } from './search-document.ts';
 import { bothOf, repeated } from './recent-values.ts';
 import { createVocabulary, type Vocabulary } from './vocabulary.ts';
@@ -30,7 +30,7 @@ export interface IndexedPage {
   readonly title: string;
   readonly kind: PageKind;
   readonly headings: readonly { readonly id: string; readonly text: string }[];
-  readonly hazards: readonly { readonly signal: SignalWord; readonly kind: HazardKind }[];
+  readonly hazards: readonly Pick<SearchHazard, 'signal' | 'kind'>[];
   /** Its first block that holds lines, and the one after its last. */
   readonly holders: readonly [number, number];
 }
@@ -81,7 +81,13 @@ export interface LinesIndex {
 
 /** True where a value that came over the wire is a lines file of this version. */
 export function isLinesFile(value: unknown): value is LinesFile {
-  return typeof value === 'object' && value !== null && 'version' in value && value.version === linesVersion && 'lines' in value;
+  return (
+    typeof value === 'object' &&
+    value !== null &&
+    'version' in value &&
+    value.version === linesVersion &&
+    'lines' in value
+  );
 }
 
 /** Makes the index of documents directly. */
@@ -102,7 +108,13 @@ export function openLinesIndex(file: LinesFile): LinesIndex {
   const endStart = startsOf(endCounts);
   const endCount = endStart[lines.count] ?? 0;
   const holderIds = unpackStrings(file.holders.ids, file.holders.count).places;
-  const place = placeContexts(texts.places, repeated(holderIds, holders.map(({ start, end }) => end - start)));
+  const place = placeContexts(
+    texts.places,
+    repeated(
+      holderIds,
+      holders.map(({ start, end }) => end - start),
+    ),
+  );
   const endContexts = repeated(place, endCounts);
   const endIds = unpackStrings(lines.endIds, endCount, endContexts);
   const colours = unpackStrings(lines.colours, lines.count, texts.places);
@@ -144,7 +156,8 @@ export function openLinesIndex(file: LinesFile): LinesIndex {
 
 function startsOf(counts: Uint32Array): Uint32Array {
   const starts = new Uint32Array(counts.length + 1);
-  for (let index = 0; index < counts.length; index += 1) starts[index + 1] = (starts[index] ?? 0) + (counts[index] ?? 0);
+  for (let index = 0; index < counts.length; index += 1)
+    starts[index + 1] = (starts[index] ?? 0) + (counts[index] ?? 0);
   return starts;
 }
 
@@ -195,14 +208,6 @@ function openPages({ pages, headings, hazards }: LinesFile, subjects: readonly I
   });
 }
 
-function parseHazard(packed: string): IndexedPage['hazards'][number] {
-  const [signal, kind] = packed.split(' ');
-  return {
-    signal: signalWords.find((word) => word === signal) ?? 'warning',
-    kind: hazardKinds.find((one) => one === kind) ?? 'battery',
-  };
-}
-
 /** The text at a place of a column. */
 export function textAt({ values, places }: StringColumn, index: number): string {
   return values[places[index] ?? 0] ?? '';
@@ -229,7 +234,10 @@ function openHolders({ holders }: LinesFile, pages: readonly IndexedPage[]): Ind
   }));
 }
 
-function openNames({ lines }: LinesFile, holders: readonly IndexedHolder[]): { own: Uint32Array; names: readonly string[] } {
+function openNames(
+  { lines }: LinesFile,
+  holders: readonly IndexedHolder[],
+): { own: Uint32Array; names: readonly string[] } {
   const written = unpackNumbers(lines.own, lines.count);
   let exceptions = 0;
   for (const code of written) if (code === 2) exceptions += 1;
@@ -273,59 +281,8 @@ function cavitiesOf(
   for (const place of places) {
     const name = (names[place] ?? '').toLowerCase();
     // A plus after a digit counts a further wire in the same cavity; after a letter it is part of a name, such as `B+`.
-    for (const key of new Set([name, name.replace(/(\d)\++$/, '$1')])) cavities.set(key, [...(cavities.get(key) ?? []), place]);
+    for (const key of new Set([name, name.replace(/(\d)\++$/, '$1')]))
+      cavities.set(key, [...(cavities.get(key) ?? []), place]);
   }
   return cavities;
-}
-
-function parseColour(packed: string): IndexedColour | null {
-  const [code, readings] = packed.split(' ');
-  if (code === undefined || code === '' || readings === undefined) return null;
-  return {
-    code: code.replace(/_/g, ' '),
-    readings: readings.split(',').flatMap((reading) => {
-      const [base, tracer] = reading.split('.');
-      const baseName = colourNames[Number(base)];
-      if (baseName === undefined || base === '') return [];
-      return [{ base: baseName, tracer: tracer === undefined || tracer === '' ? null : (colourNames[Number(tracer)] ?? null) }];
-    }),
-  };
-}
-
-function parseFace(packed: string): SearchFace | null {
-  if (packed === '') return null;
-  const [layout = '', seen = '', first = '', latch = '', contacts = ''] = packed.split('|');
-  return {
-    layout,
-    seen: oneOf<FaceSide>(['wire side', 'mating side'], seen) ?? 'wire side',
-    first: oneOf<Corner>(['top left', 'top right', 'bottom left', 'bottom right'], first),
-    latch: oneOf<LatchSide>(['top', 'bottom', 'left', 'right'], latch),
-    contacts: oneOf<'pins' | 'sockets'>(['pins', 'sockets'], contacts),
-  };
-}
-
-function oneOf<Value extends string>(values: readonly Value[], text: string): Value | null {
-  return values.find((value) => value === text) ?? null;
-}
-
-function parseApplicability(packed: string): Applicability {
-  if (packed === '') return appliesToAll;
-  const parsed: unknown = JSON.parse(packed);
-  if (!Array.isArray(parsed)) return appliesToAll;
-  const [years, markets, frames] = parsed as readonly unknown[];
-  return { years: listOf(years, spanOf), markets: listOf(markets, nameOf), frames: listOf(frames, nameOf) };
-}
-
-function listOf<Value>(value: unknown, read: (one: unknown) => Value | null): readonly Value[] {
-  return Array.isArray(value) ? value.map(read).filter((one): one is Value & NonNullable<Value> => one !== null) : [];
-}
-
-function spanOf(value: unknown): { from: number | null; to: number | null } | null {
-  if (!Array.isArray(value)) return null;
-  const [from, to] = value as readonly unknown[];
-  return { from: typeof from === 'number' ? from : null, to: typeof to === 'number' ? to : null };
-}
-
-function nameOf(value: unknown): string | null {
-  return typeof value === 'string' ? value : null;
 }

@@ -19,7 +19,10 @@ export function offeredPage(index: LinesIndex, holderPlace: number): SearchHit |
     path: `${pagePath(page.address)}#${holder.id}`,
     title: `${page.title}: ${name}`,
     subjectTitle: index.subjects[page.subject]?.title ?? '',
-    excerpt: holder.kind === 'connector' ? `${name} has ${contents(index, holder.start, holder.end)}.` : `${name} stands on this page.`,
+    excerpt:
+      holder.kind === 'connector'
+        ? `${name} has ${contents(index, holder.start, holder.end)}.`
+        : `${name} stands on this page.`,
     mark: null,
     line: null,
   };

@@ -32,7 +32,13 @@ function packProse({ address, summary, hazards, sections }: SearchDocument): Pac
 
 /** True where a value that came over the wire is a prose file of this version. */
 export function isProseFile(value: unknown): value is ProseFile {
-  return typeof value === 'object' && value !== null && 'version' in value && value.version === proseVersion && 'pages' in value;
+  return (
+    typeof value === 'object' &&
+    value !== null &&
+    'version' in value &&
+    value.version === proseVersion &&
+    'pages' in value
+  );
 }
 
 /** The pages of a book for the prose index: titles and headings from the lines, the rest from the prose where it is there. */

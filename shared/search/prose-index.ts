@@ -129,6 +129,11 @@ function entriesOf({ key, title, subjectTitle, summary, opening, sections }: Pro
   };
   return [
     whole,
-    ...sections.map(({ heading, text }, at) => ({ id: `${key}#${at}`, heading, title: `${subjectTitle}\n${title}`, text })),
+    ...sections.map(({ heading, text }, at) => ({
+      id: `${key}#${at}`,
+      heading,
+      title: `${subjectTitle}\n${title}`,
+      text,
+    })),
   ];
 }

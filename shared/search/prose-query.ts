@@ -43,10 +43,17 @@ function partOf(term: QueryTerm, known: ReadonlySet<string>): Part | null {
       }
       if (slipsForgiven(single) === 0) return anyOf(term.words, {}, term.last ? beginningWith(single) : []);
       const likely = swapped(single).filter((variant) => known.has(variant));
-      return anyOf([...term.words, ...likely], { prefix: term.last, fuzzy: (word) => (likely.length === 0 && word === single ? fuzziness : false) });
+      return anyOf([...term.words, ...likely], {
+        prefix: term.last,
+        fuzzy: (word) => (likely.length === 0 && word === single ? fuzziness : false),
+      });
     }
     case 'colour':
-      return anyOf([...term.words, plainText(term.written).replace(/[^a-z0-9]+/g, '')], {}, term.colours.map(colourPart));
+      return anyOf(
+        [...term.words, plainText(term.written).replace(/[^a-z0-9]+/g, '')],
+        {},
+        term.colours.map(colourPart),
+      );
     case 'number':
       return anyOf(term.words, {});
     case 'cavity':

@@ -37,14 +37,23 @@ export function isCode({ kind }: QueryTerm): boolean {
 
 /** A word that is a code for all one can tell, such as `YQ`: at most two letters, or three that cannot be said. */
 function isShort(term: QueryTerm): boolean {
-  return term.kind === 'word' && term.single !== null && !term.last && /^(?:[a-z]{1,2}|[^aeiou][^aeiouy]{2})$/.test(term.single);
+  return (
+    term.kind === 'word' &&
+    term.single !== null &&
+    !term.last &&
+    /^(?:[a-z]{1,2}|[^aeiou][^aeiouy]{2})$/.test(term.single)
+  );
 }
 
 /**
  * Finds the lines that answer a query, best first. A colour, cavity, size or number must be there exactly; words that
  * nothing in the book has are left out and said; only a query of nothing but words may find lines that have some of them.
  */
-export function queryLines(index: LinesIndex, query: ReadQuery, options: Partial<Omit<LinesQueryOptions, 'variantElsewhere'>> = {}): LinesAnswer {
+export function queryLines(
+  index: LinesIndex,
+  query: ReadQuery,
+  options: Partial<Omit<LinesQueryOptions, 'variantElsewhere'>> = {},
+): LinesAnswer {
   const { bench = null, limit = 15 } = options;
   const { terms } = query;
   const masks = maskTerms(index, terms);
@@ -56,7 +65,16 @@ export function queryLines(index: LinesIndex, query: ReadQuery, options: Partial
   const required = bitsOf(terms, (term, number) => isCode(term) || !masks.unanswered.has(number));
   const scan = createScan(index, terms, masks, { bench, variant, variantElsewhere, limit });
   const nothing = {
-    lines: [], count: 0, namesLine: false, someWordsOnly: false, unanswered, barred, mended: masks.mended, elsewhere: [], variant, variantElsewhere,
+    lines: [],
+    count: 0,
+    namesLine: false,
+    someWordsOnly: false,
+    unanswered,
+    barred,
+    mended: masks.mended,
+    elsewhere: [],
+    variant,
+    variantElsewhere,
     subjectTerms: terms.filter((_, number) => (scan.subjectTerms & (1 << number)) !== 0),
     namesSubject: scan.namesOtherSubject() ? ('other' as const) : null,
   };

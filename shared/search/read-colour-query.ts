@@ -22,15 +22,56 @@ const mostGlue = 4;
 
 /** German words for colours, as older diagrams are labelled, with `ae`, `oe`, `ue` and `ss` too. */
 const germanWords: Readonly<Record<string, ColourName>> = {
-  schwarz: 'black', weiss: 'white', rot: 'red', gelb: 'yellow', grun: 'green', gruen: 'green', blau: 'blue', braun: 'brown',
-  grau: 'grey', violett: 'violet', lila: 'violet', rosa: 'pink', hellblau: 'light blue', hellgrun: 'light green',
-  hellgruen: 'light green', dunkelgrun: 'dark green', dunkelgruen: 'dark green', turkis: 'turquoise', tuerkis: 'turquoise',
+  schwarz: 'black',
+  weiss: 'white',
+  rot: 'red',
+  gelb: 'yellow',
+  grun: 'green',
+  gruen: 'green',
+  blau: 'blue',
+  braun: 'brown',
+  grau: 'grey',
+  violett: 'violet',
+  lila: 'violet',
+  rosa: 'pink',
+  hellblau: 'light blue',
+  hellgrun: 'light green',
+  hellgruen: 'light green',
+  dunkelgrun: 'dark green',
+  dunkelgruen: 'dark green',
+  turkis: 'turquoise',
+  tuerkis: 'turquoise',
 };
 
 const joinedCode = /^[a-z]{1,4}$/i;
 const dividedCode = /^[a-z]{1,3}[/\\_-][a-z]{1,3}$/i;
 /** Short English words that are also some system's code; as words they are never meant as colours. */
-const neverCodes = new Set(['a', 'or', 'on', 'in', 'at', 'an', 'as', 'is', 'it', 'to', 'no', 'my', 'by', 'be', 'of', 'go', 'do', 'so', 'we', 'me', 'up', 'us', 'uk', 'eu']);
+const neverCodes = new Set([
+  'a',
+  'or',
+  'on',
+  'in',
+  'at',
+  'an',
+  'as',
+  'is',
+  'it',
+  'to',
+  'no',
+  'my',
+  'by',
+  'be',
+  'of',
+  'go',
+  'do',
+  'so',
+  'we',
+  'me',
+  'up',
+  'us',
+  'uk',
+  'eu',
+]);
 
 interface Single {
   readonly colours: readonly ColourName[];
@@ -54,14 +95,20 @@ export function readColourAt(tokens: readonly string[], at: number): ColourFound
   }
   const second = singleAt(tokens, next);
   if (second === null || second.words !== first.words) {
-    if (sawTracer && first.words) return { length: glueStart - at + tracerGlue(tokens, glueStart), colours: tracersOnly(first) };
-    return first.words ? { length: first.length, colours: first.colours.map((base) => ({ base, tracer: 'any' })) } : readCode(tokens, at);
+    if (sawTracer && first.words)
+      return { length: glueStart - at + tracerGlue(tokens, glueStart), colours: tracersOnly(first) };
+    return first.words
+      ? { length: first.length, colours: first.colours.map((base) => ({ base, tracer: 'any' })) }
+      : readCode(tokens, at);
   }
   next += second.length;
   next += tracerGlue(tokens, next);
   const [base, tracer] = sawOn && sawTracer ? [second, first] : [first, second];
-  const pairs = base.colours.flatMap((one) => tracer.colours.filter((other) => other !== one).map((other) => ({ base: one, tracer: other })));
-  if (pairs.length === 0) return { length: first.length, colours: first.colours.map((one) => ({ base: one, tracer: 'any' })) };
+  const pairs = base.colours.flatMap((one) =>
+    tracer.colours.filter((other) => other !== one).map((other) => ({ base: one, tracer: other })),
+  );
+  if (pairs.length === 0)
+    return { length: first.length, colours: first.colours.map((one) => ({ base: one, tracer: 'any' })) };
   return { length: next - at, colours: pairs };
 }
 
@@ -103,7 +150,15 @@ function readCode(tokens: readonly string[], at: number): ColourFound | null {
   const parts = plainText(token).split(/[/\\_-]/);
   const named = parts.map((part) => colourOfWords(part) ?? germanWords[part] ?? null);
   const [base, tracer] = named;
-  if (parts.length === 2 && base !== null && base !== undefined && tracer !== null && tracer !== undefined && base !== tracer) return { length: 1, colours: [{ base, tracer }] };
+  if (
+    parts.length === 2 &&
+    base !== null &&
+    base !== undefined &&
+    tracer !== null &&
+    tracer !== undefined &&
+    base !== tracer
+  )
+    return { length: 1, colours: [{ base, tracer }] };
   if (!joinedCode.test(token) && !dividedCode.test(token)) return null;
   const colours = coloursInAnySystem(token);
   if (colours.length > 0) return { length: 1, colours };

@@ -28,9 +28,25 @@ const yellowRed = 'colour yellow/red';
 
 describe('a query', () => {
   test.each([
-    'Y/R', 'YR', 'yr', 'y-r', 'Y\\R', 'y r', 'yellow red', 'yellow/red', 'Yellow, red tracer', 'yellow with a red stripe',
-    'yellow and red', 'red stripe on yellow', 'yellow wire with a thin red tracer', 'ge/rt', 'ge/ro', 'gelb rot', 'gelb/rot',
-    'YERD', 'ye/rd',
+    'Y/R',
+    'YR',
+    'yr',
+    'y-r',
+    'Y\\R',
+    'y r',
+    'yellow red',
+    'yellow/red',
+    'Yellow, red tracer',
+    'yellow with a red stripe',
+    'yellow and red',
+    'red stripe on yellow',
+    'yellow wire with a thin red tracer',
+    'ge/rt',
+    'ge/ro',
+    'gelb rot',
+    'gelb/rot',
+    'YERD',
+    'ye/rd',
   ])('says one wire by %s', (written) => {
     expect(termsOf(written).map(shortly)).toEqual([yellowRed]);
   });
@@ -89,7 +105,30 @@ describe('a query', () => {
   test('never throws, whatever is typed', () => {
     const noise = fc.oneof(
       fc.string({ unit: 'grapheme', maxLength: 400 }),
-      fc.array(fc.constantFrom('yellow', 'Y/R', '/', '-', 'with', 'a', 'pin', '3', '3+', 'on', 'stripe', 'headlight.', '.', '#', '~', 'light', 'mm', '1979')).map((words) => words.join(' ')),
+      fc
+        .array(
+          fc.constantFrom(
+            'yellow',
+            'Y/R',
+            '/',
+            '-',
+            'with',
+            'a',
+            'pin',
+            '3',
+            '3+',
+            'on',
+            'stripe',
+            'headlight.',
+            '.',
+            '#',
+            '~',
+            'light',
+            'mm',
+            '1979',
+          ),
+        )
+        .map((words) => words.join(' ')),
     );
     fc.assert(
       fc.property(noise, (text) => {

@@ -6,7 +6,12 @@ import { plainText, plainWords, singular } from './words.ts';
 /** One thing that a line must have to answer a query. */
 export type QueryTerm =
   /** A colour; `words` is what the same letters may be as a word, `names` as a cavity: `sw`, `L`. */
-  | { readonly kind: 'colour'; readonly written: string; readonly colours: readonly ColourWanted[]; readonly words: readonly string[] }
+  | {
+      readonly kind: 'colour';
+      readonly written: string;
+      readonly colours: readonly ColourWanted[];
+      readonly words: readonly string[];
+    }
   /** A cavity or terminal by name. `of` is the id it was written with, as in `headlight.3`. */
   | { readonly kind: 'cavity'; readonly written: string; readonly name: string; readonly of: string | null }
   /**
@@ -23,7 +28,13 @@ export type QueryTerm =
     }
   | { readonly kind: 'size'; readonly written: string; readonly squareMillimetres: number }
   /** A word, or several that name one thing. Any of `words` will do; `single` is the plain word, for prefixes and slips. */
-  | { readonly kind: 'word'; readonly written: string; readonly words: readonly string[]; readonly single: string | null; readonly last: boolean }
+  | {
+      readonly kind: 'word';
+      readonly written: string;
+      readonly words: readonly string[];
+      readonly single: string | null;
+      readonly last: boolean;
+    }
   /** What looks like a colour code and is none in any system. */
   | { readonly kind: 'no-colour'; readonly written: string };
 
@@ -84,20 +95,31 @@ function readTokens(tokens: readonly string[], unfinished: boolean, dropFillers:
     terms.push(...readWords(waiting, atEnd && unfinished, dropFillers));
     waiting = [];
   };
-  for (let at = 0; at < tokens.length; ) {
+  for (let at = 0; at < tokens.length;) {
     const token = tokens[at] ?? '';
     const word = plain[at] ?? '';
     const cavity = readCavityAt(plain, at);
     if (cavity !== null) {
       flush(false);
-      terms.push({ kind: 'cavity', written: tokens.slice(at, at + cavity.length).join(' '), name: cavity.name, of: null });
+      terms.push({
+        kind: 'cavity',
+        written: tokens.slice(at, at + cavity.length).join(' '),
+        name: cavity.name,
+        of: null,
+      });
       at += cavity.length;
       continue;
     }
     const address = /^([a-z][a-z0-9]*(?:-[a-z0-9]+)*)\.([a-z0-9]{1,12}\+*|[+-])(?:~.*)?$/.exec(word);
     if (address?.[1] !== undefined && address[2] !== undefined) {
       flush(false);
-      terms.push(...readWords(plainWords(address[1]).map((part) => ({ written: part, word: part })), false, false));
+      terms.push(
+        ...readWords(
+          plainWords(address[1]).map((part) => ({ written: part, word: part })),
+          false,
+          false,
+        ),
+      );
       terms.push({ kind: 'cavity', written: token, name: address[2], of: address[1] });
       at += 1;
       continue;
@@ -109,12 +131,18 @@ function readTokens(tokens: readonly string[], unfinished: boolean, dropFillers:
       terms.push(
         colour.colours.length === 0
           ? { kind: 'no-colour', written }
-          : { kind: 'colour', written, colours: colour.colours, words: isShortCode(word, colour) ? wordsFor(word) : [] },
+          : {
+              kind: 'colour',
+              written,
+              colours: colour.colours,
+              words: isShortCode(word, colour) ? wordsFor(word) : [],
+            },
       );
       at += colour.length;
       continue;
     }
-    const size = sizePattern.exec(word) ?? (/^(?:mm2|mm|sq)$/.test(plain[at + 1] ?? '') ? sizePattern.exec(`${word}mm2`) : null);
+    const size =
+      sizePattern.exec(word) ?? (/^(?:mm2|mm|sq)$/.test(plain[at + 1] ?? '') ? sizePattern.exec(`${word}mm2`) : null);
     if (size?.[1] !== undefined) {
       flush(false);
       terms.push({ kind: 'size', written: token, squareMillimetres: Number(size[1].replace(',', '.')) });
@@ -131,7 +159,12 @@ function readTokens(tokens: readonly string[], unfinished: boolean, dropFillers:
     if (number !== null) {
       const length = number.rating === 'surely' && unitWords.test(plain[at + 1] ?? '') ? 2 : 1;
       flush(false);
-      terms.push({ kind: 'number', written: tokens.slice(at, at + length).join(' '), ...number, last: unfinished && at === tokens.length - 1 });
+      terms.push({
+        kind: 'number',
+        written: tokens.slice(at, at + length).join(' '),
+        ...number,
+        last: unfinished && at === tokens.length - 1,
+      });
       at += length;
       continue;
     }
@@ -159,7 +192,11 @@ function readCavityAt(plain: readonly string[], at: number): { length: number; n
 }
 
 /** A number by itself or with its unit. A bare one below 5 before a single letter is a cavity before a colour: `3 W`. */
-function readNumber(word: string, speaksOfFuse: boolean, following: string): Pick<Extract<QueryTerm, { kind: 'number' }>, 'name' | 'words' | 'rating'> | null {
+function readNumber(
+  word: string,
+  speaksOfFuse: boolean,
+  following: string,
+): Pick<Extract<QueryTerm, { kind: 'number' }>, 'name' | 'words' | 'rating'> | null {
   if (!/^(?:\d+(?:\.\d+)?[a-z]{0,2}|[a-z]{1,2}\d*)\+*$/.test(word) || /^[a-z]+$/.test(word)) return null;
   const attached = /^(\d+(?:\.\d+)?)(a|v|w|ah)$/.exec(word);
   if (attached?.[1] !== undefined && attached[2] !== undefined && (speaksOfFuse || !terminalWithLetter.has(word))) {
@@ -169,7 +206,9 @@ function readNumber(word: string, speaksOfFuse: boolean, following: string): Pic
   if (unitWords.test(following) && (following.length > 1 || Number(word) >= 5)) {
     return { name: word, words: [word + unitOf(following)], rating: 'surely' };
   }
-  return speaksOfFuse ? { name: word, words: [`${word}a`, word], rating: 'maybe' } : { name: word, words: [word], rating: 'no' };
+  return speaksOfFuse
+    ? { name: word, words: [`${word}a`, word], rating: 'maybe' }
+    : { name: word, words: [word], rating: 'no' };
 }
 
 function unitOf(written: string): string {
@@ -191,7 +230,11 @@ function readWords(
   endsQuery: boolean,
   dropFillers: boolean,
 ): QueryTerm[] {
-  const kept = words.map(({ written, word }) => ({ written, word: singular(word), filler: fillerWords.has(word) || fillerWords.has(singular(word)) }));
+  const kept = words.map(({ written, word }) => ({
+    written,
+    word: singular(word),
+    filler: fillerWords.has(word) || fillerWords.has(singular(word)),
+  }));
   const terms: QueryTerm[] = [];
   const concepts = findConcepts(kept.map(({ word }) => word));
   let at = 0;

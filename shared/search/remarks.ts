@@ -11,7 +11,12 @@ export interface RemarkContext {
 }
 
 /** What the search made of a query, in sentences, where that helps the asker to trust the answer or to ask better. */
-export function remarksOn(index: LinesIndex, query: ReadQuery, lines: LinesAnswer, { bench, proseFound }: RemarkContext): string[] {
+export function remarksOn(
+  index: LinesIndex,
+  query: ReadQuery,
+  lines: LinesAnswer,
+  { bench, proseFound }: RemarkContext,
+): string[] {
   return [
     ...query.terms.flatMap(remarkOnTerm),
     ...lines.mended.map(({ written, word }) => `Read “${written}” as “${word}”.`),
@@ -39,14 +44,20 @@ function remarkOnUnanswered({ unanswered, lines, barred }: LinesAnswer, proseFou
   const words = unanswered.filter(({ kind }) => kind === 'word').map(({ written }) => `“${written}”`);
   if (words.length > 0 && barred) return [`No line says ${list(words, 'or')}: none is shown for the rest alone.`];
   if (words.length === 0 || (lines.length === 0 && proseFound)) return [];
-  return [lines.length > 0 ? `No line says ${list(words, 'or')}, so that was left out.` : `Nothing in the book says ${list(words, 'or')}.`];
+  return [
+    lines.length > 0
+      ? `No line says ${list(words, 'or')}, so that was left out.`
+      : `Nothing in the book says ${list(words, 'or')}.`,
+  ];
 }
 
 function remarkOnNothing({ terms }: ReadQuery, { lines, namesLine, elsewhere, subjectTerms }: LinesAnswer): string[] {
   if (!namesLine || lines.length > 0) return [];
   const codes = terms.filter((term) => !subjectTerms.includes(term)).flatMap(codeWords);
   if (codes.length === 0) return [];
-  const words = terms.filter((term) => term.kind === 'word' || subjectTerms.includes(term)).map(({ written }) => `“${written}”`);
+  const words = terms
+    .filter((term) => term.kind === 'word' || subjectTerms.includes(term))
+    .map(({ written }) => `“${written}”`);
   const where = words.length === 0 ? '' : ` together with ${list(words, 'and')}`;
   const offer = elsewhere.length > 0 ? ' Below is what is there instead.' : '';
   return [`No line of the book has ${list(codes, 'and')}${where}. None that is merely near is shown.${offer}`];
@@ -74,7 +85,10 @@ function remarkOnVariant({ year }: ReadQuery, { variant, lines }: LinesAnswer): 
   if (setBack === 0) return remarks;
   const bike = [variant.year, variant.market, variant.frame].filter((part) => part !== null).join(', ');
   const last = setBack === lines.length ? 'None of these lines holds' : 'Lines that do not hold';
-  return [...remarks, `${last} for ${bike}${setBack === lines.length ? '' : ' stand last'}: each says what it holds for.`];
+  return [
+    ...remarks,
+    `${last} for ${bike}${setBack === lines.length ? '' : ' stand last'}: each says what it holds for.`,
+  ];
 }
 
 function remarkOnBench({ subjects }: LinesIndex, { lines, namesSubject }: LinesAnswer, bench: string | null): string[] {
@@ -82,7 +96,10 @@ function remarkOnBench({ subjects }: LinesIndex, { lines, namesSubject }: LinesA
   if (title === undefined || lines.length === 0) return [];
   const ofBench = lines.filter(({ onBench }) => onBench).length;
   if (namesSubject !== null) return [];
-  if (ofBench === 0) return [`No line of ${title}, which is on your bench, answers this. These are other machines’: their colours say nothing about yours.`];
+  if (ofBench === 0)
+    return [
+      `No line of ${title}, which is on your bench, answers this. These are other machines’: their colours say nothing about yours.`,
+    ];
   return ofBench === lines.length ? [] : [`${title} is on your bench: its lines come first.`];
 }
 

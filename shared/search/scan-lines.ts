@@ -68,12 +68,33 @@ const mostBesides = 1 + 2 + 1;
 const lowHalf = (1 << exactShift) - 1;
 
 /** Prepares to look through an index for a query. */
-export function createScan(index: LinesIndex, terms: readonly QueryTerm[], found: TermMasks, options: LinesQueryOptions): Scan {
-  const { holders, pages, subjects, vocabulary, texts, details, colour, own, sizes, endStart, endIds, endTerminals, states } = index;
+export function createScan(
+  index: LinesIndex,
+  terms: readonly QueryTerm[],
+  found: TermMasks,
+  options: LinesQueryOptions,
+): Scan {
+  const {
+    holders,
+    pages,
+    subjects,
+    vocabulary,
+    texts,
+    details,
+    colour,
+    own,
+    sizes,
+    endStart,
+    endIds,
+    endTerminals,
+    states,
+  } = index;
   const { texts: masks, against, cavities, terminals, colours, sizes: sizeMasks } = found;
   const { offsets, units } = vocabulary;
   const appliesOnBench = index.applicabilities.map((applicability) => appliesTo(applicability, options.variant));
-  const appliesElsewhere = index.applicabilities.map((applicability) => appliesTo(applicability, options.variantElsewhere));
+  const appliesElsewhere = index.applicabilities.map((applicability) =>
+    appliesTo(applicability, options.variantElsewhere),
+  );
   const addressed: Addressed[] = [];
   let canBeCavity = 0;
   let bareNumbers = 0;
@@ -96,7 +117,8 @@ export function createScan(index: LinesIndex, terms: readonly QueryTerm[], found
   function idsOfEnds(line: number): number {
     let named = 0;
     const last = endStart[line + 1] ?? 0;
-    for (let end = endStart[line] ?? 0; end < last; end += 1) named |= masks[offsets.ends + (endIds.places[end] ?? 0)] ?? 0;
+    for (let end = endStart[line] ?? 0; end < last; end += 1)
+      named |= masks[offsets.ends + (endIds.places[end] ?? 0)] ?? 0;
     return named;
   }
 
@@ -116,7 +138,7 @@ export function createScan(index: LinesIndex, terms: readonly QueryTerm[], found
   }
 
   function namesOtherSubject(): boolean {
-    return subjects.some(({ slug }, subject) => slug !== options.bench && (subjectMask(subject) >>> exactShift) !== 0);
+    return subjects.some(({ slug }, subject) => slug !== options.bench && subjectMask(subject) >>> exactShift !== 0);
   }
 
   function holdersNamed(wanted: number): readonly number[] {
@@ -167,7 +189,8 @@ export function createScan(index: LinesIndex, terms: readonly QueryTerm[], found
       const onBench = options.bench !== null && subjects[subject]?.slug === options.bench;
       const applies = onBench ? appliesOnBench : appliesElsewhere;
       let elsewhere = 0;
-      for (const { bit, id, subjects: with_ } of addressed) if (id !== holder.id && with_.has(subject)) elsewhere |= bit;
+      for (const { bit, id, subjects: with_ } of addressed)
+        if (id !== holder.id && with_.has(subject)) elsewhere |= bit;
       for (let line = holder.start; line < holder.end; line += 1) {
         const text = texts.places[line] ?? 0;
         const ofText = masks[offsets.texts + text] ?? 0;
@@ -200,9 +223,7 @@ export function createScan(index: LinesIndex, terms: readonly QueryTerm[], found
         count += 1;
         if (((ofText | ofOwn | ofHolder | ofWire | ofCavity) & wanted & ~ofSubject) !== 0) inLine = true;
         const appliesHere = applies[index.applies[line] ?? 0] ?? holds;
-        const group =
-          (onBench ? groups.bench : 0) +
-          (required === 0 ? bitCount(has & wanted) * groups.term : 0);
+        const group = (onBench ? groups.bench : 0) + (required === 0 ? bitCount(has & wanted) * groups.term : 0);
         const among = appliesHere.applies ? best : setBack;
         if (group + mostScore <= among.least()) continue;
         rest = wanted;

@@ -116,7 +116,9 @@ function linesIn(
         ...plainLine,
         own: line.id,
         text: line.name ?? line.id.replace(/-/g, ' '),
-        detail: [line.componentKind.replace(/-/g, ' '), line.rating?.written ?? ''].filter((part) => part !== '').join(', '),
+        detail: [line.componentKind.replace(/-/g, ' '), line.rating?.written ?? '']
+          .filter((part) => part !== '')
+          .join(', '),
         goesTo: line.earthedBy === null ? [] : [{ id: line.earthedBy.earth, terminal: null }],
         ...rest(line),
       }));
@@ -173,7 +175,8 @@ function joinedWords({ joined }: SwitchLine): string {
 }
 
 function insideWords({ from, to, as, when }: InsideLine): string {
-  const what = as.kind === 'resistor' ? `resistor ${as.ohms} Ω` : as.kind === 'output' ? `output ${as.amps} A` : as.kind;
+  const what =
+    as.kind === 'resistor' ? `resistor ${as.ohms} Ω` : as.kind === 'output' ? `output ${as.amps} A` : as.kind;
   const ends = to === null ? from : `${from} to ${to}`;
   if (when === null) return `${ends}: ${what}`;
   return `${ends}: ${what} when ${when.kind === 'words' ? when.words : `${when.terminal} at ${when.at}`}`;
@@ -183,9 +186,14 @@ function insideWords({ from, to, as, when }: InsideLine): string {
 function worstHazard(block: TableBlock, line: Line, cautions: readonly HazardBlock[]): SearchHazard | null {
   let worst: SearchHazard | null = null;
   for (const kind of hazardsTouchedByLine(block, line)) {
-    const own = nearest(cautions.filter((caution) => hazardsOf(caution).includes(kind)), line.line);
+    const own = nearest(
+      cautions.filter((caution) => hazardsOf(caution).includes(kind)),
+      line.line,
+    );
     const hazard: SearchHazard =
-      own === null ? { signal: bookCautions[kind].signal, kind, text: null } : { signal: own.signal, kind, text: own.text };
+      own === null
+        ? { signal: bookCautions[kind].signal, kind, text: null }
+        : { signal: own.signal, kind, text: own.text };
     if (worst === null || signalWords.indexOf(hazard.signal) < signalWords.indexOf(worst.signal)) worst = hazard;
   }
   return worst;
@@ -198,7 +206,9 @@ function nearest(cautions: readonly HazardBlock[], line: number): HazardBlock | 
 
 function placeOf(hazards: SearchHazard[], wanted: SearchHazard | null): number | null {
   if (wanted === null) return null;
-  const place = hazards.findIndex(({ signal, kind, text }) => signal === wanted.signal && kind === wanted.kind && text === wanted.text);
+  const place = hazards.findIndex(
+    ({ signal, kind, text }) => signal === wanted.signal && kind === wanted.kind && text === wanted.text,
+  );
   return place >= 0 ? place : hazards.push(wanted) - 1;
 }
 

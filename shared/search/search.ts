@@ -39,7 +39,9 @@ export function search(indexes: SearchIndexes, query: string, options: Partial<S
   const lines = queryLines(indexes.lines, read, { bench, variant, limit: most.lines });
   const prose = indexes.prose?.search(read, bench, most.sections) ?? nothing;
   const lineHits = lines.lines
-    .map((found) => lineHit(indexes.lines, indexes.prose, found, found.onBench ? lines.variant : lines.variantElsewhere))
+    .map((found) =>
+      lineHit(indexes.lines, indexes.prose, found, found.onBench ? lines.variant : lines.variantElsewhere),
+    )
     .filter((hit) => hit !== null);
   const offered = lines.elsewhere.map((holder) => offeredPage(indexes.lines, holder)).filter((hit) => hit !== null);
   const sectionHits = prose.sections.map(sectionHit);
@@ -54,7 +56,10 @@ export function search(indexes: SearchIndexes, query: string, options: Partial<S
   return {
     query,
     hits: order(linesFirst, lineHits, [...offered, ...sectionHits], pageHits, lines, prose).slice(0, limit),
-    remarks: remarksOn(indexes.lines, read, lines, { bench, proseFound: prose.sections.length + prose.pages.length > 0 }),
+    remarks: remarksOn(indexes.lines, read, lines, {
+      bench,
+      proseFound: prose.sections.length + prose.pages.length > 0,
+    }),
     bench: benchTitle(indexes.lines, bench) === null ? null : bench,
   };
 }

@@ -8,7 +8,11 @@ const word = fc.string({ unit: fc.constantFrom(...'abcde'), maxLength: 7 });
 function naiveSlips(a: string, b: string): number {
   if (a === '' || b === '') return Math.max(a.length, b.length);
   const last = a.at(-1) === b.at(-1) ? 0 : 1;
-  const ways = [naiveSlips(a.slice(0, -1), b) + 1, naiveSlips(a, b.slice(0, -1)) + 1, naiveSlips(a.slice(0, -1), b.slice(0, -1)) + last];
+  const ways = [
+    naiveSlips(a.slice(0, -1), b) + 1,
+    naiveSlips(a, b.slice(0, -1)) + 1,
+    naiveSlips(a.slice(0, -1), b.slice(0, -1)) + last,
+  ];
   if (a.length > 1 && b.length > 1 && a.at(-1) === b.at(-2) && a.at(-2) === b.at(-1)) {
     ways.push(naiveSlips(a.slice(0, -2), b.slice(0, -2)) + 1);
   }

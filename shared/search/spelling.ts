@@ -18,7 +18,8 @@ export function slipsBetween(a: string, b: string, most: number): number {
     for (let j = 1; j <= b.length; j += 1) {
       const same = a[i - 1] === b[j - 1];
       let slips = Math.min((previous[j] ?? 0) + 1, (row[j - 1] ?? 0) + 1, (previous[j - 1] ?? 0) + (same ? 0 : 1));
-      if (i > 1 && j > 1 && a[i - 1] === b[j - 2] && a[i - 2] === b[j - 1]) slips = Math.min(slips, (before[j - 2] ?? 0) + 1);
+      if (i > 1 && j > 1 && a[i - 1] === b[j - 2] && a[i - 2] === b[j - 1])
+        slips = Math.min(slips, (before[j - 2] ?? 0) + 1);
       row.push(slips);
       least = Math.min(least, slips);
     }
@@ -33,7 +34,8 @@ export function slipsBetween(a: string, b: string, most: number): number {
 export function swapped(word: string): string[] {
   const variants: string[] = [];
   for (let at = 0; at + 1 < word.length; at += 1) {
-    if (word[at] !== word[at + 1]) variants.push(word.slice(0, at) + (word[at + 1] ?? '') + (word[at] ?? '') + word.slice(at + 2));
+    if (word[at] !== word[at + 1])
+      variants.push(word.slice(0, at) + (word[at + 1] ?? '') + (word[at] ?? '') + word.slice(at + 2));
   }
   return variants;
 }

@@ -102,7 +102,13 @@ function oppositesOf(words: readonly string[]): readonly string[] {
   return words.map((word) => opposites.get(word)).filter((word) => word !== undefined);
 }
 
-function markWords({ vocabulary }: LinesIndex, texts: Int32Array, words: readonly string[], weak: number, strong: number): boolean {
+function markWords(
+  { vocabulary }: LinesIndex,
+  texts: Int32Array,
+  words: readonly string[],
+  weak: number,
+  strong: number,
+): boolean {
   let found = false;
   for (const word of words) {
     for (const posting of vocabulary.postings.get(word) ?? []) {
@@ -157,7 +163,13 @@ function markTerminals({ endTerminals }: LinesIndex, masks: Int32Array, wanted: 
   return found;
 }
 
-function markColours({ colours }: LinesIndex, masks: Int32Array, wanted: readonly ColourWanted[], any: number, exact: number): boolean {
+function markColours(
+  { colours }: LinesIndex,
+  masks: Int32Array,
+  wanted: readonly ColourWanted[],
+  any: number,
+  exact: number,
+): boolean {
   let found = false;
   colours.forEach((colour, place) => {
     if (colour === null) return;

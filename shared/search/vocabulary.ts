@@ -33,11 +33,29 @@ export interface Vocabulary {
   readonly letters: Int32Array;
 }
 
-const order = ['subjects', 'pages', 'holders', 'zones', 'names', 'texts', 'details', 'ends'] as const satisfies readonly TextPlace[];
+const order = [
+  'subjects',
+  'pages',
+  'holders',
+  'zones',
+  'names',
+  'texts',
+  'details',
+  'ends',
+] as const satisfies readonly TextPlace[];
 
 /** Reads every text of an index once. */
 export function createVocabulary(texts: VocabularyTexts): Vocabulary {
-  const offsets: Record<TextPlace, number> = { subjects: 0, pages: 0, holders: 0, zones: 0, names: 0, texts: 0, details: 0, ends: 0 };
+  const offsets: Record<TextPlace, number> = {
+    subjects: 0,
+    pages: 0,
+    holders: 0,
+    zones: 0,
+    names: 0,
+    texts: 0,
+    details: 0,
+    ends: 0,
+  };
   const read = new Map<string, ReturnType<typeof findableWords>>();
   const postings = new Map<string, number[]>();
   const all: string[] = [];
@@ -58,7 +76,8 @@ export function createVocabulary(texts: VocabularyTexts): Vocabulary {
     const isName = number >= offsets.subjects && number < offsets.subjects + texts.subjects.length;
     const strong = new Set(words.strong.filter((word) => !isName || !word.startsWith('~')));
     for (const word of strong) add(postings, word, number * 2 + 1);
-    for (const word of new Set(words.weak)) if (!strong.has(word) && !(isName && word.startsWith('~'))) add(postings, word, number * 2);
+    for (const word of new Set(words.weak))
+      if (!strong.has(word) && !(isName && word.startsWith('~'))) add(postings, word, number * 2);
   });
   const words = [...postings.keys()].filter((word) => !word.startsWith('~')).sort();
   return { offsets, count: all.length, units, postings, words, letters: Int32Array.from(words, lettersOf) };

@@ -8,12 +8,29 @@ describe('plain words', () => {
 
   test('lose the s of a plural and keep the s of a word', () => {
     expect(['fuses', 'switches', 'batteries', 'boxes', 'brass', 'bus', 'chassis', 'gas'].map(singular)).toEqual([
-      'fuse', 'switch', 'battery', 'box', 'brass', 'bus', 'chassi', 'gas',
+      'fuse',
+      'switch',
+      'battery',
+      'box',
+      'brass',
+      'bus',
+      'chassi',
+      'gas',
     ]);
   });
 
   test('come apart at hyphens, slashes and dots', () => {
-    expect(plainWords('tell-tale of Y/R at dip-switch.HI')).toEqual(['tell', 'tale', 'of', 'y', 'r', 'at', 'dip', 'switch', 'hi']);
+    expect(plainWords('tell-tale of Y/R at dip-switch.HI')).toEqual([
+      'tell',
+      'tale',
+      'of',
+      'y',
+      'r',
+      'at',
+      'dip',
+      'switch',
+      'hi',
+    ]);
   });
 });
 

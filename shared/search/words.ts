@@ -1,7 +1,16 @@
 import { conceptsWithin, findConcepts } from './concepts.ts';
 
 /** Letters that do not come apart into a plain letter and an accent. */
-const plainLetters: Readonly<Record<string, string>> = { ø: 'o', æ: 'ae', œ: 'oe', ß: 'ss', ł: 'l', đ: 'd', þ: 'th', ð: 'd' };
+const plainLetters: Readonly<Record<string, string>> = {
+  ø: 'o',
+  æ: 'ae',
+  œ: 'oe',
+  ß: 'ss',
+  ł: 'l',
+  đ: 'd',
+  þ: 'th',
+  ð: 'd',
+};
 
 /** Lower case without accents, so that `Sørvik` and `sorvik` are one; `mm²` becomes `mm2`. */
 export function plainText(text: string): string {

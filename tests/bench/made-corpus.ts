@@ -83,7 +83,9 @@ function capital(word: string): string {
 function makeNames(dice: Dice): (usual: string) => string {
   const chosen = new Map<string, string>();
   return (usual) => {
-    const name = chosen.get(usual) ?? pick(dice, [usual, usual, usual, `${usual} lead`, `${usual}, loom half`, `${usual} (${pick(dice, letters)})`]);
+    const name =
+      chosen.get(usual) ??
+      pick(dice, [usual, usual, usual, `${usual} lead`, `${usual}, loom half`, `${usual} (${pick(dice, letters)})`]);
     chosen.set(usual, name);
     return name;
   };
@@ -91,7 +93,13 @@ function makeNames(dice: Dice): (usual: string) => string {
 
 const usualConnectors = [...frontConnectors, ...centreConnectors, ...rearConnectors];
 
-function makeDonor(dice: Dice, maker: string, ofMaker: Map<string, string>, names: Donor['names'], slugs: Set<string>): Donor {
+function makeDonor(
+  dice: Dice,
+  maker: string,
+  ofMaker: Map<string, string>,
+  names: Donor['names'],
+  slugs: Set<string>,
+): Donor {
   let title = '';
   let slug = '';
   do {
@@ -105,7 +113,8 @@ function makeDonor(dice: Dice, maker: string, ofMaker: Map<string, string>, name
   const colours = new Map<string, string>();
   for (const { circuit } of [...cavities.values()].flat()) {
     if (!ofMaker.has(circuit)) ofMaker.set(circuit, makeColour(dice, circuit));
-    if (!colours.has(circuit)) colours.set(circuit, dice() < 0.12 ? makeColour(dice, circuit) : (ofMaker.get(circuit) ?? 'B'));
+    if (!colours.has(circuit))
+      colours.set(circuit, dice() < 0.12 ? makeColour(dice, circuit) : (ofMaker.get(circuit) ?? 'B'));
   }
   return { slug, title, from: 1968 + Math.floor(dice() * 24), colours, names, cavities };
 }
@@ -118,7 +127,11 @@ function shuffled<Value>(dice: Dice, list: readonly Value[]): Value[] {
 }
 
 /** A donor's cavities: the usual ones leading to where the donor has them, and some that others lack. */
-function cavitiesOf(dice: Dice, order: readonly MadeCavity[], orders: ReadonlyMap<string, readonly MadeCavity[]>): MadeCavity[] {
+function cavitiesOf(
+  dice: Dice,
+  order: readonly MadeCavity[],
+  orders: ReadonlyMap<string, readonly MadeCavity[]>,
+): MadeCavity[] {
   const usual = order.map((cavity) => {
     const [id = '', number = ''] = cavity.goesTo.split('.');
     const target = usualConnectors.find((one) => one.id === id)?.cavities[Number(number) - 1];
@@ -141,19 +154,36 @@ function makeColour(dice: Dice, circuit: string): string {
 }
 
 function* pagesOf(dice: Dice, write: (words: number) => string, donor: Donor): Generator<MadePage> {
-  const prose = (heading: string, words: number, ...blocks: SourceBlock[]): MadeSection => ({ heading, text: write(words), blocks });
+  const prose = (heading: string, words: number, ...blocks: SourceBlock[]): MadeSection => ({
+    heading,
+    text: write(words),
+    blocks,
+  });
   const connectors = (list: readonly MadeConnector[]): MadeSection[] =>
     list.filter(() => dice() < 0.97).map((one) => prose(donor.names(one.name), 60, connectorBlock(dice, donor, one)));
   const made = (page: string, title: string, kind: PageKind, sections: MadeSection[]): MadePage =>
     makePage(donor, page, title, kind, write(14), sections);
   const asides = (count: number): MadeSection[] =>
     Array.from({ length: count }, () => prose(capital(write(3).toLowerCase().replace('.', '')), 110));
-  yield made('overview', donor.title, 'overview', [...asides(5), prose('Where everything is', 120, componentsBlock(dice))]);
-  yield made('pinouts-front', 'Front connectors', 'pinouts', [...connectors(frontConnectors), prose('Going back together', 60)]);
-  yield made('pinouts-centre', 'Centre connectors', 'pinouts', [...connectors(centreConnectors), prose('Heavy wires', 40, wiresBlock())]);
+  yield made('overview', donor.title, 'overview', [
+    ...asides(5),
+    prose('Where everything is', 120, componentsBlock(dice)),
+  ]);
+  yield made('pinouts-front', 'Front connectors', 'pinouts', [
+    ...connectors(frontConnectors),
+    prose('Going back together', 60),
+  ]);
+  yield made('pinouts-centre', 'Centre connectors', 'pinouts', [
+    ...connectors(centreConnectors),
+    prose('Heavy wires', 40, wiresBlock()),
+  ]);
   yield made('pinouts-rear', 'Rear connectors', 'pinouts', [...connectors(rearConnectors), ...asides(2)]);
   yield made('quirks', 'Quirks', 'quirks', [hazardSection(dice, write), ...asides(7)]);
-  yield made('checks', 'Checks', 'checks', [prose('Before you measure', 120), prose('What to expect', 60, checksBlock()), ...asides(4)]);
+  yield made('checks', 'Checks', 'checks', [
+    prose('Before you measure', 120),
+    prose('What to expect', 60, checksBlock()),
+    ...asides(4),
+  ]);
 }
 
 function connectorBlock(dice: Dice, donor: Donor, { id, name, zone, layouts }: MadeConnector): SourceBlock {
@@ -162,7 +192,14 @@ function connectorBlock(dice: Dice, donor: Donor, { id, name, zone, layouts }: M
   const changed = Math.floor(dice() * cavities.length * 6);
   cavities.forEach(({ circuit, goesTo, size }, at) => {
     const wire = donor.colours.get(circuit) ?? 'B';
-    const row = (colour: string, years: string): string[] => [String(at + 1), colour, size, donor.names(circuit), goesTo, years];
+    const row = (colour: string, years: string): string[] => [
+      String(at + 1),
+      colour,
+      size,
+      donor.names(circuit),
+      goesTo,
+      years,
+    ];
     if (at === changed) {
       const year = donor.from + 2;
       rows.push(row(wire, `${donor.from}-${year - 1}`), row(makeColour(dice, circuit), `${year}-`));
@@ -187,7 +224,9 @@ function connectorBlock(dice: Dice, donor: Donor, { id, name, zone, layouts }: M
 
 function seatCount(layout: string): number {
   const grid = /^(\d+)x(\d+)$/.exec(layout);
-  return grid === null ? layout.split('+').reduce((sum, row) => sum + Number(row), 0) : Number(grid[1]) * Number(grid[2]);
+  return grid === null
+    ? layout.split('+').reduce((sum, row) => sum + Number(row), 0)
+    : Number(grid[1]) * Number(grid[2]);
 }
 
 function componentsBlock(dice: Dice): SourceBlock {
@@ -195,24 +234,48 @@ function componentsBlock(dice: Dice): SourceBlock {
     id: null,
     attributes: { cite: 'm1' },
     headings: ['Id', 'Kind', 'Name', 'Rating', 'Earthed by'],
-    rows: madeComponents.filter(() => dice() < 0.95).map((component) => [...component, component[1] === 'load' && dice() < 0.3 ? 'frame' : '']),
+    rows: madeComponents
+      .filter(() => dice() < 0.95)
+      .map((component) => [...component, component[1] === 'load' && dice() < 0.3 ? 'frame' : '']),
   });
 }
 
 function wiresBlock(): SourceBlock {
-  const rows = madeWires.map(([from, to, size, length]) => [from, to, /frame|engine/.test(to) ? 'B' : 'R', size, length]);
-  return block('wires', { id: null, attributes: { cite: 'm1' }, headings: ['From', 'To', 'Wire', 'mm²', 'Length m'], rows });
+  const rows = madeWires.map(([from, to, size, length]) => [
+    from,
+    to,
+    /frame|engine/.test(to) ? 'B' : 'R',
+    size,
+    length,
+  ]);
+  return block('wires', {
+    id: null,
+    attributes: { cite: 'm1' },
+    headings: ['From', 'To', 'Wire', 'mm²', 'Length m'],
+    rows,
+  });
 }
 
 function checksBlock(): SourceBlock {
   const rows = madeChecks.map((check) => [...check]);
-  return block('checks', { id: null, attributes: { cite: 'c1' }, headings: ['Check', 'Between', 'Expect', 'At'], rows });
+  return block('checks', {
+    id: null,
+    attributes: { cite: 'c1' },
+    headings: ['Check', 'Between', 'Expect', 'At'],
+    rows,
+  });
 }
 
 function hazardSection(dice: Dice, write: (words: number) => string): MadeSection {
   const of = pick(dice, ['battery', 'charging', 'starter', 'ignition']);
   const hazard: SourceBlock = {
-    name: 'hazard', id: null, attributes: { signal: 'warning', of }, table: null, text: write(30), line: 1, endLine: 3,
+    name: 'hazard',
+    id: null,
+    attributes: { signal: 'warning', of },
+    table: null,
+    text: write(30),
+    line: 1,
+    endLine: 3,
   };
   return { heading: 'Before you begin', text: write(30), blocks: [hazard] };
 }
@@ -229,35 +292,72 @@ function block(name: string, { id, attributes, headings, rows }: Written): Sourc
   return { name, id, attributes, table, text: '', line: 1, endLine: rows.length + 4 };
 }
 
-function makePage(donor: Donor, page: string, title: string, kind: PageKind, summary: string, sections: readonly MadeSection[]): MadePage {
+function makePage(
+  donor: Donor,
+  page: string,
+  title: string,
+  kind: PageKind,
+  summary: string,
+  sections: readonly MadeSection[],
+): MadePage {
   const address: PageAddress = { shelf: 'donors', subject: donor.slug, page };
   const sources = [
     { id: 'm1', kind: 'factory-manual', title: 'Workshop manual (made for measuring)', where: 'chapter 14' },
     { id: 'c1', kind: 'club-measurement', title: 'A loom on a bench (made for measuring)', where: 'sheet 2' },
   ] as const;
   const blocks = sections.flatMap((section) =>
-    section.blocks.map((source) => readBlock(source, { colours: { name: 'jis' } }).block).filter((one): one is Block => one !== null),
+    section.blocks
+      .map((source) => readBlock(source, { colours: { name: 'jis' } }).block)
+      .filter((one): one is Block => one !== null),
   );
   const text: PublishedText = {
     address,
     subjectTitle: donor.title,
     frontMatter: { ...emptyFrontMatter, title, kind, summary, sources },
-    outline: sections.map(({ heading }, at) => ({ level: 2, text: heading, id: `s-${slugOf(heading)}`, line: at + 20 })),
+    outline: sections.map(({ heading }, at) => ({
+      level: 2,
+      text: heading,
+      id: `s-${slugOf(heading)}`,
+      line: at + 20,
+    })),
     sections: sections.map(({ heading, text }) => ({ id: `s-${slugOf(heading)}`, heading, text })),
     blocks,
   };
   const frontMatter = [
-    '---', `title: ${title}`, `kind: ${kind}`, `summary: ${summary}`, 'colours: jis', 'sources:',
-    ...sources.flatMap((source) => [`  - id: ${source.id}`, `    kind: ${source.kind}`, `    title: ${source.title}`, `    where: ${source.where}`]),
-    '---', '',
+    '---',
+    `title: ${title}`,
+    `kind: ${kind}`,
+    `summary: ${summary}`,
+    'colours: jis',
+    'sources:',
+    ...sources.flatMap((source) => [
+      `  - id: ${source.id}`,
+      `    kind: ${source.kind}`,
+      `    title: ${source.title}`,
+      `    where: ${source.where}`,
+    ]),
+    '---',
+    '',
   ];
-  const body = sections.flatMap(({ heading, text, blocks: sources_ }) => [`## ${heading}`, '', text, '', ...sources_.flatMap((source) => [markdownOf(source), ''])]);
+  const body = sections.flatMap(({ heading, text, blocks: sources_ }) => [
+    `## ${heading}`,
+    '',
+    text,
+    '',
+    ...sources_.flatMap((source) => [markdownOf(source), '']),
+  ]);
   return { address, markdown: [...frontMatter, ...body].join('\n'), text };
 }
 
 function markdownOf({ name, id, attributes, table, text }: SourceBlock): string {
-  const written = [id === null ? '' : `#${id}`, ...Object.entries(attributes).map(([key, value]) => `${key}="${value}"`)].filter((part) => part !== '');
+  const written = [
+    id === null ? '' : `#${id}`,
+    ...Object.entries(attributes).map(([key, value]) => `${key}="${value}"`),
+  ].filter((part) => part !== '');
   const row = (cells: readonly string[]): string => `| ${cells.join(' | ')} |`;
-  const lines = table === null ? [text] : [row(table.headings), row(table.headings.map(() => '--')), ...table.rows.map(({ cells }) => row(cells))];
+  const lines =
+    table === null
+      ? [text]
+      : [row(table.headings), row(table.headings.map(() => '--')), ...table.rows.map(({ cells }) => row(cells))];
   return [`:::${name}{${written.join(' ')}}`, ...lines, ':::'].join('\n');
 }

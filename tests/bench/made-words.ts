@@ -22,7 +22,9 @@ export function pick<Value>(dice: Dice, list: readonly Value[]): Value {
 const common =
   `the a of and to in is it that on with for as at by from or not be this are but have an which you when if one there will
   out up then off only before after where under behind between through over until each both two three first last same
-  other more less old new good bad long short clean dry wet hot cold loose tight left right front rear top bottom inside`.split(/\s+/);
+  other more less old new good bad long short clean dry wet hot cold loose tight left right front rear top bottom inside`.split(
+    /\s+/,
+  );
 const trade =
   `connector cavity terminal wire loom tracer earth frame engine battery fuse relay switch lamp bulb headlamp indicator
   horn starter solenoid igniter coil pickup alternator regulator rectifier charging ignition kill clutch neutral stand
@@ -32,9 +34,14 @@ const trade =
   gauge diagram manual page figure year model market owner previous repair bodge splice tap lead charge drain load
   current voltage drop feed return switched live permanent position rest momentary thermal flasher module unit diode
   resistor condenser points advance timing spark plug cap winding stator rotor brush slip ring dynamo field sender
-  oil pressure temperature fuel pump gauge clock tell-tale dial bench spanner screwdriver photograph label bag tag`.split(/\s+/);
-const syllables = `ba be bi bo bra bre da de di dor du fa fel fi for ga gel gi gor ha hel hi hor ka kel ki kor la len li lor ma mel
-  mi mor na nel ni nor pa pel pi por ra rel ri ror sa sel si sor ta tel ti tor va vel vi vor wa wel wi wor`.split(/\s+/);
+  oil pressure temperature fuel pump gauge clock tell-tale dial bench spanner screwdriver photograph label bag tag`.split(
+    /\s+/,
+  );
+const syllables =
+  `ba be bi bo bra bre da de di dor du fa fel fi for ga gel gi gor ha hel hi hor ka kel ki kor la len li lor ma mel
+  mi mor na nel ni nor pa pel pi por ra rel ri ror sa sel si sor ta tel ti tor va vel vi vor wa wel wi wor`.split(
+    /\s+/,
+  );
 
 /** A word that no language has. */
 export function madeWord(dice: Dice, least: number, most: number): string {
@@ -54,7 +61,7 @@ export function createWriter(dice: Dice, vocabulary: number): (words: number) =>
   const scale = Math.log(words.length + 1);
   return (count) => {
     const sentences: string[] = [];
-    for (let left = count; left > 0; ) {
+    for (let left = count; left > 0;) {
       const length = Math.min(left, 6 + Math.floor(dice() * 12));
       const sentence = Array.from({ length }, () => words[Math.floor(Math.exp(dice() * scale)) - 1] ?? 'the').join(' ');
       sentences.push(`${sentence.charAt(0).toUpperCase()}${sentence.slice(1)}.`);

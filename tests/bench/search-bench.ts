@@ -48,7 +48,10 @@ function processorMilliseconds(work: () => unknown): number {
 function percentile95(rounds: number, work: (typed: string) => unknown): number {
   const presses = keyPresses();
   const ofRounds = Array.from({ length: rounds + 1 }, () =>
-    percentile(presses.map((typed) => processorMilliseconds(() => work(typed))), 0.95),
+    percentile(
+      presses.map((typed) => processorMilliseconds(() => work(typed))),
+      0.95,
+    ),
   );
   return Math.min(...ofRounds.slice(1));
 }
@@ -66,7 +69,9 @@ export async function searchRows(pace: Pace): Promise<BenchRow[]> {
   const { lines, holders, hazards, ...titles } = file;
   const index = openLinesIndex(file);
   const indexes = { lines: index, prose: buildProseIndex(documents) };
-  const more = openLinesIndex(buildLinesFile([...makeCorpus(usualPages * 2)].map(({ text }) => searchDocumentOf(text))));
+  const more = openLinesIndex(
+    buildLinesFile([...makeCorpus(usualPages * 2)].map(({ text }) => searchDocumentOf(text))),
+  );
 
   const rounds = Math.max(2, Math.floor(pace.rounds / 4));
   const both = percentile95(rounds, (typed) => search(indexes, typed));

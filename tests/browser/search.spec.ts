@@ -29,17 +29,31 @@ async function indexIsThere(page: Page): Promise<void> {
 
 async function signedIn(who: string): Promise<APIRequestContext> {
   const context = await request.newContext({ baseURL: club.origin, extraHTTPHeaders: { origin: club.origin } });
-  const answer = await context.post('/api/session', { data: { email: `${who}@earthstrap.example`, password: demoPassword } });
+  const answer = await context.post('/api/session', {
+    data: { email: `${who}@earthstrap.example`, password: demoPassword },
+  });
   expect(answer.ok()).toBe(true);
   return context;
 }
 
 /** Publishes a changed page the way it happens in the club: one proposes and sends, another publishes. */
-async function publish(shelf: string, subject: string, name: string, change: (markdown: string) => string): Promise<void> {
+async function publish(
+  shelf: string,
+  subject: string,
+  name: string,
+  change: (markdown: string) => string,
+): Promise<void> {
   const writer = await signedIn('writer');
   const moderator = await signedIn('moderator');
   const page = await (await writer.get(`/api/pages/${shelf}/${subject}/${name}`)).json();
-  const body = { shelf, subject, page: name, baseRevision: page.revision, markdown: change(page.markdown), summary: 'A wasp.' };
+  const body = {
+    shelf,
+    subject,
+    page: name,
+    baseRevision: page.revision,
+    markdown: change(page.markdown),
+    summary: 'A wasp.',
+  };
   const proposal = await (await writer.post('/api/proposals', { data: body })).json();
   expect((await writer.post(`/api/proposals/${proposal.id}/send`)).ok()).toBe(true);
   expect((await moderator.post(`/api/proposals/${proposal.id}/publish`, { data: {} })).ok()).toBe(true);
@@ -63,7 +77,9 @@ test('a colour and a connector, typed in the rail, lead to the cavity', async ({
   await expect(page).toHaveURL(club.origin + headlight);
 });
 
-test('the answer is drawn before any click, follows the typing without the server, and stands in the address', async ({ page }) => {
+test('the answer is drawn before any click, follows the typing without the server, and stands in the address', async ({
+  page,
+}) => {
   await page.goto(`${club.origin}/search?q=yellow+red+headlight`);
   await indexIsThere(page);
   const answer = page.locator('.answer-line').first();
@@ -83,7 +99,9 @@ test('the answer is drawn before any click, follows the typing without the serve
   await expect(field(page)).toBeFocused();
 });
 
-test('a cavity that does not exist is answered by no line, and by the page that says what is there', async ({ page }) => {
+test('a cavity that does not exist is answered by no line, and by the page that says what is there', async ({
+  page,
+}) => {
   await page.goto(`${club.origin}/search?q=qf550+headlight+9`);
   await indexIsThere(page);
   await expect(page.locator('.answer-line')).toHaveCount(0);
@@ -103,7 +121,12 @@ test('what is published is found in an open page within a minute', async ({ page
       return page.locator('#search-standing').innerText();
     })
     .toBe('No answers.');
-  await publish('donors', 'kestova-360', 'notes', (markdown) => `${markdown}\n\n## A vespiary in the horn\n\nIt hums at any voltage.\n`);
+  await publish(
+    'donors',
+    'kestova-360',
+    'notes',
+    (markdown) => `${markdown}\n\n## A vespiary in the horn\n\nIt hums at any voltage.\n`,
+  );
   await expect
     .poll(
       async () => {

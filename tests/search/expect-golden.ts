@@ -8,7 +8,11 @@ export function expectGolden(entry: GoldenQuery, { hits, remarks }: SearchAnswer
   const reason = `${entry.query}: ${entry.why}`;
   if (entry.first !== null) expect(addresses[0], reason).toBe(entry.first);
   for (const address of entry.among) expect(addresses.slice(0, 5), reason).toContain(address);
-  if (entry.noLines) expect(hits.filter(({ kind }) => kind === 'line').map(({ address }) => address), reason).toEqual([]);
+  if (entry.noLines)
+    expect(
+      hits.filter(({ kind }) => kind === 'line').map(({ address }) => address),
+      reason,
+    ).toEqual([]);
   if (entry.offers !== null) expect(hits.find(({ kind }) => kind === 'page')?.address, reason).toBe(entry.offers);
   if (entry.says !== null) expect(remarks.join(' '), reason).toContain(entry.says);
   if (entry.last === null) return;
@@ -17,5 +21,8 @@ export function expectGolden(entry: GoldenQuery, { hits, remarks }: SearchAnswer
   expect(ruledOut, reason).toBeGreaterThanOrEqual(0);
   expect(lines[ruledOut]?.line?.appliesHere, reason).toBe(false);
   expect(lines[ruledOut]?.line?.applies, reason).toContain('not ');
-  expect(lines.slice(ruledOut).every(({ line }) => line?.appliesHere === false), reason).toBe(true);
+  expect(
+    lines.slice(ruledOut).every(({ line }) => line?.appliesHere === false),
+    reason,
+  ).toBe(true);
 }

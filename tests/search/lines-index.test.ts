@@ -10,7 +10,12 @@ import { buildProseFile, prosePages } from '../../shared/search/prose-file.ts';
 import { prosePageOf } from '../../shared/search/prose-page.ts';
 import { queryLines } from '../../shared/search/query-lines.ts';
 import { readQuery } from '../../shared/search/read-query.ts';
-import { lineStates, type SearchDocument, type SearchHolder, type SearchLine } from '../../shared/search/search-document.ts';
+import {
+  lineStates,
+  type SearchDocument,
+  type SearchHolder,
+  type SearchLine,
+} from '../../shared/search/search-document.ts';
 import { searchDocumentOf } from '../../shared/search/search-document-of.ts';
 import { search } from '../../shared/search/search.ts';
 import { conceptsWithin } from '../../shared/search/concepts.ts';
@@ -138,9 +143,14 @@ describe.each(corpora)('the lines of the %s book', (corpus) => {
         ...entry.line.goesTo.map(({ id }) => id),
       ].flatMap(plainWords);
     const words = [...new Set(flat[corpus].flatMap(({ line }) => plainWords(line.text)))].filter(
-      (word) => /^[a-z]{5,}$/.test(word) && conceptsWithin([word]).length === 0 && readQuery(`${word} `).terms[0]?.kind === 'word',
+      (word) =>
+        /^[a-z]{5,}$/.test(word) &&
+        conceptsWithin([word]).length === 0 &&
+        readQuery(`${word} `).terms[0]?.kind === 'word',
     );
-    const subjects = new Set(documents[corpus].flatMap(({ subjectTitle, address }) => plainWords(`${subjectTitle} ${address.subject}`)));
+    const subjects = new Set(
+      documents[corpus].flatMap(({ subjectTitle, address }) => plainWords(`${subjectTitle} ${address.subject}`)),
+    );
     const spoken = words.filter((word) => !subjects.has(word));
     fc.assert(
       fc.property(fc.constantFrom(...spoken), (word) => {
@@ -156,7 +166,9 @@ describe.each(corpora)('the lines of the %s book', (corpus) => {
     fc.assert(
       fc.property(fc.constantFrom(...addressed), ({ document, holder, line }) => {
         const index = indexOf(corpus);
-        const [first] = queryLines(index, readQuery(`${holder.id}.${line.own}`), { bench: document.address.subject }).lines;
+        const [first] = queryLines(index, readQuery(`${holder.id}.${line.own}`), {
+          bench: document.address.subject,
+        }).lines;
         const block = first === undefined ? undefined : index.holders[first.holder];
         expect(block?.id).toBe(holder.id);
         expect(index.names[index.own[first?.line ?? -1] ?? -1]).toBe(line.own);
@@ -167,7 +179,31 @@ describe.each(corpora)('the lines of the %s book', (corpus) => {
 
   test('are searched without throwing, whatever is typed, and never with another colour than was asked for', () => {
     const both = { lines: indexOf(corpus), prose: buildProseIndex(documents[corpus].slice(0, 12)) };
-    const pieces = fc.constantFrom('yellow', 'Y/R', 'red', 'headlight', 'haedlight', 'pin', '3', '9', '.', 'earth', 'left', 'fuse', '20', 'a', 'qf550', '~', '#', '2+', 'neutrla', '1981', 'UK', 'zzz', 'ø');
+    const pieces = fc.constantFrom(
+      'yellow',
+      'Y/R',
+      'red',
+      'headlight',
+      'haedlight',
+      'pin',
+      '3',
+      '9',
+      '.',
+      'earth',
+      'left',
+      'fuse',
+      '20',
+      'a',
+      'qf550',
+      '~',
+      '#',
+      '2+',
+      'neutrla',
+      '1981',
+      'UK',
+      'zzz',
+      'ø',
+    );
     fc.assert(
       fc.property(fc.array(pieces, { maxLength: 7 }), fc.boolean(), (words, spaced) => {
         const query = words.join(spaced ? ' ' : '');
@@ -178,7 +214,14 @@ describe.each(corpora)('the lines of the %s book', (corpus) => {
           for (const { line } of hits) {
             if (line === null) continue;
             const said = line.colourWords ?? '';
-            expect(term.colours.some(({ base, tracer }) => (base === 'any' || said.includes(base)) && (tracer === 'any' || tracer === null || said.includes(tracer))), `${query}: ${said}`).toBe(true);
+            expect(
+              term.colours.some(
+                ({ base, tracer }) =>
+                  (base === 'any' || said.includes(base)) &&
+                  (tracer === 'any' || tracer === null || said.includes(tracer)),
+              ),
+              `${query}: ${said}`,
+            ).toBe(true);
           }
         }
       }),
@@ -202,7 +245,9 @@ test('a prose index takes a changed page in place of what it was', () => {
   index.setPage(prosePageOf({ ...document, sections: [anchor] }));
   expect(index.search(readQuery('wasp '), null, 10).sections.map(({ section }) => section)).toEqual([anchor]);
   const old = document.sections[0]?.heading ?? '';
-  expect(index.search(readQuery(`${old} `), null, 10).sections.filter(({ section }) => section?.heading === old)).toEqual([]);
+  expect(
+    index.search(readQuery(`${old} `), null, 10).sections.filter(({ section }) => section?.heading === old),
+  ).toEqual([]);
   index.removePage(formatPageAddress(document.address));
   expect(index.search(readQuery('wasp '), null, 10).sections).toEqual([]);
   expect(index.size).toBe(0);

@@ -15,7 +15,13 @@ import { demoTexts } from '../factories/demo-documents.ts';
 import { expectGolden } from './expect-golden.ts';
 import { goldenQueries } from './golden-list.ts';
 
-const member: Member = { id: 'm', name: 'Hobbyist', email: 'hobbyist@earthstrap.example', role: 'member', suspended: false };
+const member: Member = {
+  id: 'm',
+  name: 'Hobbyist',
+  email: 'hobbyist@earthstrap.example',
+  role: 'member',
+  suspended: false,
+};
 const onceUponATime = { revision: 1, publishedAt: '2026-01-01T12:00:00.000Z' };
 let published: Map<string, PublishedDocument>;
 const services: SearchService[] = [];
@@ -77,7 +83,9 @@ describe('the server searches in a thread of its own', () => {
     const outline = [{ level: 2, text: 'A wasp in the horn', id: 's-a-wasp-in-the-horn', line: 9 }];
     book.set(formatPageAddress(address), { ...page, outline, sections, blocks: [], revision: 2 });
     events.tell({ kind: 'published', address, revision: 2 });
-    expect((await ask(service, 'wasp horn')).hits[0]?.address).toBe('donors/torimachi-qf550/quirks#s-a-wasp-in-the-horn');
+    expect((await ask(service, 'wasp horn')).hits[0]?.address).toBe(
+      'donors/torimachi-qf550/quirks#s-a-wasp-in-the-horn',
+    );
     expect((await ask(service, 'thermal flasher')).hits.some(isOfPage)).toBe(false);
     book.delete(formatPageAddress(address));
     events.tell({ kind: 'published', address, revision: 3 });
@@ -89,7 +97,10 @@ describe('the server searches in a thread of its own', () => {
     expect(await service.search(null, 'horn', null, anyVariant)).toMatchObject({ ok: false, refusal: { status: 401 } });
     expect(await service.manifest(null)).toMatchObject({ ok: false, refusal: { status: 401 } });
     expect(await service.file(null, 'anything.json')).toMatchObject({ ok: false, refusal: { status: 401 } });
-    expect(await service.search({ ...member, suspended: true }, 'horn', null, anyVariant)).toMatchObject({ ok: false, refusal: { status: 403 } });
+    expect(await service.search({ ...member, suspended: true }, 'horn', null, anyVariant)).toMatchObject({
+      ok: false,
+      refusal: { status: 403 },
+    });
   });
 });
 
@@ -116,20 +127,30 @@ describe('the files that browsers fetch', () => {
     expect(again).toEqual(manifest);
   });
 
-  test('change their names when something is published, and the old ones are still there for who has just read of them', { timeout: 120_000 }, async () => {
-    const { service, events, book } = openService();
-    const before = await service.manifest(member);
-    if (!before.ok) throw new Error(before.refusal.title);
-    const address: PageAddress = { shelf: 'donors', subject: 'torimachi-qf550', page: 'quirks' };
-    book.delete(formatPageAddress(address));
-    events.tell({ kind: 'published', address, revision: 2 });
-    await expect
-      .poll(async () => {
-        const now = await service.manifest(member);
-        return now.ok && now.value.prose.name !== before.value.prose.name;
-      }, { timeout: 60_000 })
-      .toBe(true);
-    expect(await service.file(member, before.value.prose.name)).toMatchObject({ ok: true, value: { name: before.value.prose.name } });
-    expect(await service.file(member, 'nothing.json')).toEqual({ ok: true, value: null });
-  });
+  test(
+    'change their names when something is published, and the old ones are still there for who has just read of them',
+    { timeout: 120_000 },
+    async () => {
+      const { service, events, book } = openService();
+      const before = await service.manifest(member);
+      if (!before.ok) throw new Error(before.refusal.title);
+      const address: PageAddress = { shelf: 'donors', subject: 'torimachi-qf550', page: 'quirks' };
+      book.delete(formatPageAddress(address));
+      events.tell({ kind: 'published', address, revision: 2 });
+      await expect
+        .poll(
+          async () => {
+            const now = await service.manifest(member);
+            return now.ok && now.value.prose.name !== before.value.prose.name;
+          },
+          { timeout: 60_000 },
+        )
+        .toBe(true);
+      expect(await service.file(member, before.value.prose.name)).toMatchObject({
+        ok: true,
+        value: { name: before.value.prose.name },
+      });
+      expect(await service.file(member, 'nothing.json')).toEqual({ ok: true, value: null });
+    },
+  );
 });

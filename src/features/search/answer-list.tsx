@@ -26,7 +26,11 @@ function groupsOf(hits: readonly SearchHit[]): Group[] {
       continue;
     }
     const again = groups.some(({ kind }) => kind === hit.kind);
-    groups.push({ kind: hit.kind, title: again ? `More ${groupTitles[hit.kind].toLowerCase()}` : groupTitles[hit.kind], hits: [hit] });
+    groups.push({
+      kind: hit.kind,
+      title: again ? `More ${groupTitles[hit.kind].toLowerCase()}` : groupTitles[hit.kind],
+      hits: [hit],
+    });
   }
   return groups;
 }
@@ -68,6 +72,8 @@ function moveByArrows(event: KeyboardEvent<HTMLElement>): void {
   if (at < 0) return;
   event.preventDefault();
   const back = event.key === 'Escape' || (event.key === 'ArrowUp' && at === 0);
-  const next = back ? document.querySelector<HTMLElement>('[data-search-field="sheet"]') : links[at + (event.key === 'ArrowDown' ? 1 : -1)];
+  const next = back
+    ? document.querySelector<HTMLElement>('[data-search-field="sheet"]')
+    : links[at + (event.key === 'ArrowDown' ? 1 : -1)];
   next?.focus();
 }

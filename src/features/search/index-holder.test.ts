@@ -48,7 +48,9 @@ function openHolder(files: Record<string, unknown>) {
   const holder = createIndexHolder({
     fetchFile(name) {
       fetched.push(name);
-      return name in files ? Promise.resolve(JSON.parse(JSON.stringify(files[name]))) : Promise.reject(new Error(`no ${name}`));
+      return name in files
+        ? Promise.resolve(JSON.parse(JSON.stringify(files[name])))
+        : Promise.reject(new Error(`no ${name}`));
     },
     breathe: () => Promise.resolve(),
     onHeld: (lines, prose) => held.push(`${lines ?? '–'} ${prose ?? '–'}`),
@@ -102,7 +104,10 @@ describe('the index in the browser', () => {
 
   test('lets a newer load overtake an older one', async () => {
     const { holder, titlesFor } = openHolder(files);
-    await Promise.all([holder.load({ lines: 'lines-1', prose: 'prose-1' }), holder.load({ lines: 'lines-2', prose: 'prose-2' })]);
+    await Promise.all([
+      holder.load({ lines: 'lines-1', prose: 'prose-1' }),
+      holder.load({ lines: 'lines-2', prose: 'prose-2' }),
+    ]);
     expect(titlesFor('rattle ')).toEqual(['section Noises']);
     expect(titlesFor('wasp ')).toEqual([]);
   });

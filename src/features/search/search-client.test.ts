@@ -5,7 +5,11 @@ import { createSearchClient } from './search-client.ts';
 import type { FromSearchThread, ToSearchThread } from './worker-messages.ts';
 
 function manifest(generation: number): Response {
-  const files = { version: 1, lines: { name: `lines-${generation}`, bytes: 1 }, prose: { name: `prose-${generation}`, bytes: 1 } };
+  const files = {
+    version: 1,
+    lines: { name: `lines-${generation}`, bytes: 1 },
+    prose: { name: `prose-${generation}`, bytes: 1 },
+  };
   return new Response(JSON.stringify(files), { status: 200, headers: { etag: `"${generation}"` } });
 }
 
@@ -99,7 +103,8 @@ describe('the search client', () => {
     await settle();
     hear({ kind: 'holds', lines: 'lines-1', prose: null });
     const answers = ['h', 'ho', 'hor', 'horn'].map((query) => client.ask({ query, bench: emptyBench }));
-    const questions = (): string[] => said.flatMap((message) => (message.kind === 'ask' ? [message.question.query] : []));
+    const questions = (): string[] =>
+      said.flatMap((message) => (message.kind === 'ask' ? [message.question.query] : []));
     expect(questions()).toEqual(['h']);
     hear({ kind: 'answer', id: 1, view: viewOf('h') });
     expect(questions()).toEqual(['h', 'horn']);

@@ -53,7 +53,8 @@ export function createSearchClient({ startThread, fetcher, later }: ClientSurrou
 
   function become(change: Partial<SearchStatus>): void {
     const changed = { ...current, ...change };
-    if (changed.lines === current.lines && changed.prose === current.prose && changed.network === current.network) return;
+    if (changed.lines === current.lines && changed.prose === current.prose && changed.network === current.network)
+      return;
     current = changed;
     for (const listener of [...listeners]) listener();
   }
@@ -122,14 +123,17 @@ export function createSearchClient({ startThread, fetcher, later }: ClientSurrou
 
 /** The names of the files in a manifest; null where it is not one that this page knows. */
 function readFiles(manifest: unknown): IndexFiles | null {
-  if (typeof manifest !== 'object' || manifest === null || !('lines' in manifest) || !('prose' in manifest)) return null;
+  if (typeof manifest !== 'object' || manifest === null || !('lines' in manifest) || !('prose' in manifest))
+    return null;
   const lines = nameIn(manifest.lines);
   const prose = nameIn(manifest.prose);
   return lines === null || prose === null ? null : { lines, prose };
 }
 
 function nameIn(file: unknown): string | null {
-  return typeof file === 'object' && file !== null && 'name' in file && typeof file.name === 'string' ? file.name : null;
+  return typeof file === 'object' && file !== null && 'name' in file && typeof file.name === 'string'
+    ? file.name
+    : null;
 }
 
 let ofThisPage: SearchClient | null = null;
@@ -148,6 +152,7 @@ function startSearchThread(): SearchThread {
   const worker = new Worker(new URL('./search-worker.ts', import.meta.url), { type: 'module', name: 'search' });
   return {
     say: (message) => worker.postMessage(message),
-    listen: (listener) => worker.addEventListener('message', ({ data }: MessageEvent<FromSearchThread>) => listener(data)),
+    listen: (listener) =>
+      worker.addEventListener('message', ({ data }: MessageEvent<FromSearchThread>) => listener(data)),
   };
 }

@@ -32,12 +32,26 @@ const line: SearchHit = {
     faceSvg: null,
   },
 };
-const section: SearchHit = { ...line, kind: 'section', address: 'a', path: '/donors/testbike/quirks#s-beams', title: 'Beams', excerpt: 'Yellow it is.', line: null };
+const section: SearchHit = {
+  ...line,
+  kind: 'section',
+  address: 'a',
+  path: '/donors/testbike/quirks#s-beams',
+  title: 'Beams',
+  excerpt: 'Yellow it is.',
+  line: null,
+};
 const view: SearchView = { query: 'yellow', hits: [line, section], remarks: [], bench: null };
 
 /** The server answers; the index never comes, for jsdom has no workers. */
 beforeEach(() => {
-  vi.stubGlobal('Worker', class { postMessage(): void {} addEventListener(): void {} });
+  vi.stubGlobal(
+    'Worker',
+    class {
+      postMessage(): void {}
+      addEventListener(): void {}
+    },
+  );
   vi.stubGlobal('fetch', () => Promise.reject(new Error('no network in this test')));
   Element.prototype.scrollIntoView = () => undefined;
 });

@@ -1,4 +1,13 @@
-import { useEffect, useId, useRef, useState, type FocusEvent, type FormEvent, type KeyboardEvent, type ReactElement } from 'react';
+import {
+  useEffect,
+  useId,
+  useRef,
+  useState,
+  type FocusEvent,
+  type FormEvent,
+  type KeyboardEvent,
+  type ReactElement,
+} from 'react';
 import { Form, useLocation, useNavigate } from 'react-router';
 import type { SearchHit } from '../../../shared/contracts/views.ts';
 import { emptyBench, readBench, type Bench } from '../../lib/bench.ts';
@@ -97,7 +106,14 @@ function Field({ placement }: SearchFieldProps): ReactElement {
       } as const)
     : {};
   return (
-    <Form role="search" aria-label={labels[placement]} action={paths.search()} className="search-form search-field" onSubmit={submit} onBlur={leave}>
+    <Form
+      role="search"
+      aria-label={labels[placement]}
+      action={paths.search()}
+      className="search-form search-field"
+      onSubmit={submit}
+      onBlur={leave}
+    >
       <input
         ref={field}
         className="field-control search-input"
@@ -121,9 +137,20 @@ function Field({ placement }: SearchFieldProps): ReactElement {
           {shown ? (
             <>
               {hits.map((hit, at) => (
-                <SearchOption key={keyOf(hit)} id={optionId(at)} hit={hit} active={at === active} onChoose={() => go(hit.path)} />
+                <SearchOption
+                  key={keyOf(hit)}
+                  id={optionId(at)}
+                  hit={hit}
+                  active={at === active}
+                  onChoose={() => go(hit.path)}
+                />
               ))}
-              <SearchOption id={optionId(hits.length)} hit={null} active={active === hits.length} onChoose={() => go(paths.search(typed.trim()))} />
+              <SearchOption
+                id={optionId(hits.length)}
+                hit={null}
+                active={active === hits.length}
+                onChoose={() => go(paths.search(typed.trim()))}
+              />
             </>
           ) : null}
         </ul>

@@ -25,7 +25,11 @@ export function SearchOption({ id, hit, active, onChoose }: SearchOptionProps): 
       id={id}
       role="option"
       aria-selected={active}
-      className={classNames('search-option', active && 'search-option-active', hit?.line?.appliesHere === false && 'answer-set-back')}
+      className={classNames(
+        'search-option',
+        active && 'search-option-active',
+        hit?.line?.appliesHere === false && 'answer-set-back',
+      )}
       onMouseDown={(event) => event.preventDefault()}
       onClick={onChoose}
     >
@@ -44,7 +48,9 @@ function OptionText({ hit }: { readonly hit: SearchHit }): ReactElement {
         {line?.circuit === null || line === null ? null : <span>{line.circuit}</span>}
         <span className="soft">{hit.subjectTitle}</span>
         {line?.hazard ? <b className={`signal-word signal-${line.hazard.signal}`}>{line.hazard.signal}</b> : null}
-        {line === null && hit.excerpt !== null ? <span className="soft search-option-excerpt">{hit.excerpt}</span> : null}
+        {line === null && hit.excerpt !== null ? (
+          <span className="soft search-option-excerpt">{hit.excerpt}</span>
+        ) : null}
         {line?.appliesHere === false ? <span className="answer-why">Set back: it holds {line.applies}</span> : null}
       </span>
     </>

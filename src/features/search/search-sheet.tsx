@@ -45,7 +45,13 @@ export function SearchSheet(): ReactElement {
   );
 }
 
-function SheetField({ typed, onType }: { readonly typed: string; readonly onType: (text: string) => void }): ReactElement {
+function SheetField({
+  typed,
+  onType,
+}: {
+  readonly typed: string;
+  readonly onType: (text: string) => void;
+}): ReactElement {
   const field = useRef<HTMLInputElement>(null);
   const navigate = useNavigate();
   useSlash(field);
@@ -94,8 +100,14 @@ function Standing({ answers, typed }: { readonly answers: Answers; readonly type
   const { view, source, unanswered } = answers;
   const asked = typed.trim();
   const sentences = [
-    asked === '' || view === null ? null : view.hits.length === 0 ? 'No answers.' : `${counted(view.hits.length, 'answer')}.`,
-    source === 'server' && lines === null && network === 'reached' ? 'The server answered: the index is still loading.' : null,
+    asked === '' || view === null
+      ? null
+      : view.hits.length === 0
+        ? 'No answers.'
+        : `${counted(view.hits.length, 'answer')}.`,
+    source === 'server' && lines === null && network === 'reached'
+      ? 'The server answered: the index is still loading.'
+      : null,
     source === 'index' && prose === null ? 'Lines and headings so far: the text is still loading.' : null,
   ].filter((sentence) => sentence !== null);
   return (
@@ -105,12 +117,16 @@ function Standing({ answers, typed }: { readonly answers: Answers; readonly type
       </p>
       {network === 'unreachable' && lines !== null ? (
         <Notice look="warn" title="The network is gone">
-          <p>These answers are from the copy of the book that this browser holds. News will come when the network does.</p>
+          <p>
+            These answers are from the copy of the book that this browser holds. News will come when the network does.
+          </p>
         </Notice>
       ) : null}
       {unanswered ? (
         <Notice look="stop" title="The search cannot be reached" live>
-          <p>What you have typed is still here. See whether there is a connection, then change a letter or press Find.</p>
+          <p>
+            What you have typed is still here. See whether there is a connection, then change a letter or press Find.
+          </p>
         </Notice>
       ) : null}
     </>

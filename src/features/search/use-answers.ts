@@ -50,7 +50,9 @@ export function useAnswers(query: string, bench: Bench, first: SearchView | null
     } else if (!isKnown) {
       settled = setTimeout(() => {
         void api.search(asked, donor, variant).then((answer) => {
-          show(answer.ok ? { view: answer.value, source: 'server', unanswered: false } : { ...nothing, unanswered: true });
+          show(
+            answer.ok ? { view: answer.value, source: 'server', unanswered: false } : { ...nothing, unanswered: true },
+          );
         });
       }, settleMilliseconds);
     }
