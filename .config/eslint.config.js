@@ -64,7 +64,7 @@ export default tseslint.config(
     },
   },
   {
-    files: ['*.config.ts', 'tests/browser/global-setup.ts', '.config/**'],
+    files: ['*.config.ts', 'tests/browser/global-setup.ts', 'tests/setup/untyped-packages.d.ts', '.config/**'],
     rules: { 'no-restricted-syntax': 'off' },
   },
   {

@@ -13,6 +13,7 @@ import { anyVariant } from '../../shared/pages/applicability.ts';
 import { prepareDemoBook } from '../browser/club.ts';
 import type { Pace } from './pace.ts';
 import type { BenchRow } from './row.ts';
+import type * as EntryServer from '../../src/entry-server.tsx';
 import { milliseconds, sideBySide } from './side-by-side.ts';
 
 const pages = ['/donors/torimachi-qf550/pinouts-front', '/donors/torimachi-qf550/quirks'] as const;
@@ -26,10 +27,10 @@ function readersDoor(actor: Member): Door {
 }
 
 /** The site's renderer as it was built. */
-async function builtRenderer(): Promise<typeof import('../../src/entry-server.tsx')> {
+async function builtRenderer(): Promise<typeof EntryServer> {
   const file = pathToFileURL(join(process.cwd(), 'dist', 'server', 'entry-server.js')).href;
   // Built from the very file whose type is given.
-  return (await import(/* @vite-ignore */ file)) as typeof import('../../src/entry-server.tsx');
+  return (await import(/* @vite-ignore */ file)) as typeof EntryServer;
 }
 
 /**

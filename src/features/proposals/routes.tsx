@@ -69,5 +69,6 @@ async function editor() {
     import('./editor-action.ts'),
     import('./editor-sheets.tsx'),
   ]);
-  return { ...loaders, ...action, ...sheets };
+  const { ChangeSheet, NewSubjectSheet, NewPageSheet } = sheets;
+  return { ...loaders, ...action, ChangeSheet, NewSubjectSheet, NewPageSheet };
 }
