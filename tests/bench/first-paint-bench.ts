@@ -1,6 +1,7 @@
 import type { Browser } from '@playwright/test';
 import { openClub, prepareDemoBook } from '../browser/club.ts';
 import { openBrowser, slowLine, slowProcessor, visit } from './browser.ts';
+import { opened } from './opened.ts';
 import type { Pace } from './pace.ts';
 import { openPlainTwin } from './plain-twin.ts';
 import type { BenchRow } from './row.ts';
@@ -32,10 +33,10 @@ function firstPaint(browser: Browser, url: string): Promise<number> {
 /** The first paint of a page with connectors beside that of the same HTML and CSS without any script. */
 export async function firstPaintRows(pace: Pace): Promise<BenchRow[]> {
   await prepareDemoBook();
-  const club = await openClub();
-  const twin = await openPlainTwin(club.origin, pagePath);
-  const browser = await openBrowser();
-  try {
+  return opened(async (open) => {
+    const club = await open(openClub());
+    const twin = await open(openPlainTwin(club.origin, pagePath));
+    const browser = await open(openBrowser());
     const [ours, plain] = [club.origin + pagePath, twin.origin + pagePath];
     await firstPaint(browser, ours);
     await firstPaint(browser, plain);
@@ -54,9 +55,5 @@ export async function firstPaintRows(pace: Pace): Promise<BenchRow[]> {
         budget: { kind: 'at most', ratio: 1.1 },
       },
     ];
-  } finally {
-    await browser.close();
-    await twin.close();
-    await club.close();
-  }
+  });
 }

@@ -3,12 +3,14 @@ import { openClubAt } from '../browser/club.ts';
 import { openBrowser, slowProcessor, visit } from './browser.ts';
 import { requireMadeBook } from './made-book.ts';
 import { longestMainThreadTask } from './main-thread-tasks.ts';
+import { opened } from './opened.ts';
 import type { Pace } from './pace.ts';
 import { median, type BenchRow } from './row.ts';
 import { milliseconds } from './side-by-side.ts';
 
 const pagesOfBook = 1000;
 const longestMilliseconds = 50;
+const indexFile = /\/search\/[\w-]{22}\.json$/;
 const keyMilliseconds = 90;
 const queries = ['y/r headlight', 'dip beam earth', 'igniter pickup'];
 
@@ -21,20 +23,30 @@ async function type(page: Page, query: string): Promise<void> {
   await page.waitForTimeout(300);
 }
 
+/** Waits for both files of the index, the lines and the prose. */
+async function untilIndexCame(files: ReadonlySet<string>): Promise<void> {
+  for (let attempt = 0; attempt < 600 && files.size < 2; attempt += 1) {
+    await new Promise((resolve) => setTimeout(resolve, 100));
+  }
+  if (files.size < 2) throw new Error('the index was not fetched within a minute');
+}
+
 /** Milliseconds of the longest task of the page's own thread, from the field's focus until the last answer. */
 function longestBlock(browser: Browser, url: string): Promise<number> {
   return visit(browser, async ({ page, devtools }) => {
+    const files = new Set<string>();
+    page.on('response', (response) => {
+      if (indexFile.test(response.url())) files.add(response.url());
+    });
     await devtools.send('Emulation.setCPUThrottlingRate', { rate: slowProcessor });
     await page.goto(url, { waitUntil: 'load' });
     const field = page.locator('input[role=combobox]').first();
     await field.waitFor();
-    await page.waitForTimeout(500);
-    const files = [/manifest\.json/, /search\/[\w-]{22}\.json/].map((name) => page.waitForResponse(name));
     await browser.startTracing(page, { categories: ['toplevel', 'disabled-by-default-devtools.timeline'] });
     await field.focus();
     // While the lines, the titles and the prose arrive and are opened.
     for (const query of queries) await type(page, query);
-    await Promise.all(files);
+    await untilIndexCame(files);
     await page.waitForTimeout(3000);
     // And when everything is there.
     for (const query of queries) await type(page, query);
@@ -43,10 +55,10 @@ function longestBlock(browser: Browser, url: string): Promise<number> {
 }
 
 /** How long the search keeps the page's own thread busy in one go. */
-export async function pageThreadRows({ visits }: Pace): Promise<BenchRow[]> {
-  const club = await openClubAt(requireMadeBook(pagesOfBook));
-  const browser = await openBrowser();
-  try {
+export function pageThreadRows({ visits }: Pace): Promise<BenchRow[]> {
+  return opened(async (open) => {
+    const club = await open(openClubAt(requireMadeBook(pagesOfBook)));
+    const browser = await open(openBrowser());
     const blocks: number[] = [];
     for (let round = 0; round < visits; round += 1) blocks.push(await longestBlock(browser, `${club.origin}/`));
     return [
@@ -59,8 +71,5 @@ export async function pageThreadRows({ visits }: Pace): Promise<BenchRow[]> {
         budget: { kind: 'at most', ratio: 1 },
       },
     ];
-  } finally {
-    await browser.close();
-    await club.close();
-  }
+  });
 }

@@ -1,5 +1,6 @@
 import { slowInputs } from '../fixtures/slow-inputs.ts';
 import { honestPage } from './honest-page.ts';
+import { opened } from './opened.ts';
 import type { Pace } from './pace.ts';
 import { median, type BenchRow } from './row.ts';
 import { milliseconds } from './side-by-side.ts';
@@ -45,9 +46,9 @@ async function readUntil(origin: string, isOver: () => boolean): Promise<void> {
 }
 
 /** How long the server stands still while it refuses the texts that are slow to parse. */
-export async function pauseRows({ visits }: Pace): Promise<BenchRow[]> {
-  const club = await openWatchedClub();
-  try {
+export function pauseRows({ visits }: Pace): Promise<BenchRow[]> {
+  return opened(async (open) => {
+    const club = await open(openWatchedClub());
     const act = async (): Promise<void> => {
       let over = false;
       const sending = sendAll(club.origin).finally(() => {
@@ -68,7 +69,5 @@ export async function pauseRows({ visits }: Pace): Promise<BenchRow[]> {
         budget: { kind: 'at most', ratio: 1 },
       },
     ];
-  } finally {
-    await club.close();
-  }
+  });
 }

@@ -1,9 +1,10 @@
-import { spawn, type ChildProcess } from 'node:child_process';
+import { spawn } from 'node:child_process';
 import { mkdtempSync, rmSync, writeFileSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import autocannon from 'autocannon';
 import { openClub, prepareDemoBook } from '../browser/club.ts';
+import { opened } from './opened.ts';
 import type { Pace } from './pace.ts';
 import { settledGet } from './raw-get.ts';
 import { median, type BenchRow } from './row.ts';
@@ -59,13 +60,24 @@ http {
 }
 `;
 
+function startServer(command: string, args: readonly string[]): { close(): Promise<void> } {
+  const server = spawn(command, args, { stdio: 'inherit' });
+  const ended = new Promise<void>((resolve) => server.once('exit', () => resolve()));
+  return {
+    async close() {
+      server.kill();
+      await ended;
+    },
+  };
+}
+
 /** A published page for a visitor, beside Express and nginx sending the same bytes. */
 export async function servingRows({ loadRounds, loadSeconds }: Pace): Promise<BenchRow[]> {
   await prepareDemoBook();
-  const club = await openClub();
   const folder = mkdtempSync(join(tmpdir(), 'earthstrap-bench-'));
-  const children: ChildProcess[] = [];
-  try {
+  return opened(async (open) => {
+    await open({ close: () => rmSync(folder, { recursive: true, force: true }) });
+    const club = await open(openClub());
     const file = join(folder, 'page.br');
     writeFileSync(file, (await settledGet(club.origin + pagePath)).bytes);
     const expressPort = 41_731;
@@ -73,8 +85,8 @@ export async function servingRows({ loadRounds, loadSeconds }: Pace): Promise<Be
     const expressFile = join(process.cwd(), '.cache', 'bench-express.mjs');
     writeFileSync(expressFile, expressSource(file, expressPort));
     writeFileSync(join(folder, 'nginx.conf'), nginxSource(folder, nginxPort));
-    children.push(spawn(process.execPath, [expressFile], { stdio: 'inherit' }));
-    children.push(spawn('/usr/sbin/nginx', ['-c', join(folder, 'nginx.conf')], { stdio: 'inherit' }));
+    await open(startServer(process.execPath, [expressFile]));
+    await open(startServer('/usr/sbin/nginx', ['-c', join(folder, 'nginx.conf')]));
     const expressUrl = `http://127.0.0.1:${String(expressPort)}${pagePath}`;
     const nginxUrl = `http://127.0.0.1:${String(nginxPort)}${pagePath}`;
     await untilAnswers(expressUrl);
@@ -109,9 +121,5 @@ export async function servingRows({ loadRounds, loadSeconds }: Pace): Promise<Be
         budget: { kind: 'at least', ratio: 0.35 },
       },
     ];
-  } finally {
-    for (const child of children) child.kill();
-    await club.close();
-    rmSync(folder, { recursive: true, force: true });
-  }
+  });
 }

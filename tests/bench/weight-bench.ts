@@ -1,6 +1,8 @@
 import { brotliDecompressSync } from 'node:zlib';
+import type { Browser } from '@playwright/test';
 import { openClub, prepareDemoBook } from '../browser/club.ts';
 import { openBrowser, visit } from './browser.ts';
+import { opened } from './opened.ts';
 import { rawGet, settledGet } from './raw-get.ts';
 import type { BenchRow } from './row.ts';
 import { kilobytes } from './side-by-side.ts';
@@ -9,24 +11,19 @@ const pagePath = '/donors/torimachi-qf550/pinouts-front';
 const mostScriptBytes = 120_000;
 
 /** Bytes over the wire of a first visit, by the kind of what was asked for. */
-async function weightsByKind(url: string): Promise<Map<string, number>> {
-  const browser = await openBrowser();
-  try {
-    return await visit(browser, async ({ page, devtools }) => {
-      const kinds = new Map<string, string>();
-      const weights = new Map<string, number>();
-      devtools.on('Network.responseReceived', ({ requestId, type }) => kinds.set(requestId, type));
-      devtools.on('Network.loadingFinished', ({ requestId, encodedDataLength }) => {
-        const kind = kinds.get(requestId) ?? 'Other';
-        weights.set(kind, (weights.get(kind) ?? 0) + encodedDataLength);
-      });
-      await devtools.send('Network.enable');
-      await page.goto(url, { waitUntil: 'networkidle' });
-      return weights;
+function weightsByKind(browser: Browser, url: string): Promise<Map<string, number>> {
+  return visit(browser, async ({ page, devtools }) => {
+    const kinds = new Map<string, string>();
+    const weights = new Map<string, number>();
+    devtools.on('Network.responseReceived', ({ requestId, type }) => kinds.set(requestId, type));
+    devtools.on('Network.loadingFinished', ({ requestId, encodedDataLength }) => {
+      const kind = kinds.get(requestId) ?? 'Other';
+      weights.set(kind, (weights.get(kind) ?? 0) + encodedDataLength);
     });
-  } finally {
-    await browser.close();
-  }
+    await devtools.send('Network.enable');
+    await page.goto(url, { waitUntil: 'networkidle' });
+    return weights;
+  });
 }
 
 /** The scripts that stand before the page's text and hold it up: neither modules nor deferred. */
@@ -41,14 +38,14 @@ export function scriptsBeforeText(html: string): string[] {
 /** What a visitor's first page with connectors weighs. */
 export async function weightRows(): Promise<BenchRow[]> {
   await prepareDemoBook();
-  const club = await openClub();
-  try {
+  return opened(async (open) => {
+    const club = await open(openClub());
     const { bytes } = await settledGet(club.origin + pagePath);
     const html = brotliDecompressSync(bytes).toString();
     const blocking = scriptsBeforeText(html);
     let blockingBytes = 0;
     for (const src of blocking) blockingBytes += src === '' ? 0 : (await rawGet(club.origin + src)).bytes.length;
-    const weights = await weightsByKind(club.origin + pagePath);
+    const weights = await weightsByKind(await open(openBrowser()), club.origin + pagePath);
     const script = weights.get('Script') ?? 0;
     const known = (what: string, kind: string): BenchRow => ({
       what: `over the wire, a visitor's first connector page: ${what}`,
@@ -79,7 +76,5 @@ export async function weightRows(): Promise<BenchRow[]> {
       known('CSS', 'Stylesheet'),
       known('fonts', 'Font'),
     ];
-  } finally {
-    await club.close();
-  }
+  });
 }
