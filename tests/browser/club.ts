@@ -33,7 +33,7 @@ async function freePort(): Promise<number> {
 }
 
 async function answers(origin: string, server: ChildProcess): Promise<void> {
-  const until = Date.now() + 60_000;
+  const until = Date.now() + 240_000;
   while (Date.now() < until) {
     if (server.exitCode !== null) throw new Error(`the server ended with ${String(server.exitCode)}`);
     const up = await fetch(`${origin}/healthz`).then(
@@ -43,7 +43,7 @@ async function answers(origin: string, server: ChildProcess): Promise<void> {
     if (up) return;
     await new Promise((resolve) => setTimeout(resolve, 50));
   }
-  throw new Error('the server did not answer within a minute');
+  throw new Error('the server did not answer within four minutes');
 }
 
 /** Opens a club on a folder of data that stays where it is. */
