@@ -34,7 +34,7 @@ export function startView(
   if (address === null || published === null) {
     if (revision !== null) return refuse(noSuchRevision(revision));
     const kind = slug === null ? wanted : kindOfSlug(slug);
-    return accept({ ...start, baseRevision: null, markdown: templateOf(kind), summary: '' });
+    return accept({ ...start, baseRevision: null, markdown: templateOf(kind, shelf), summary: '' });
   }
   const markdown = publication.markdown(address, revision ?? published.revision);
   if (markdown === null) return refuse(noSuchRevision(revision ?? published.revision));
