@@ -25,21 +25,17 @@ interface Refusal {
   readonly title: string;
   readonly detail: string;
   readonly fields?: Readonly<Record<string, string>>;
-  readonly retryAfterSeconds?: number;
 }
 
-/** A refusal in answer to a form, read out at once; what is wrong with each field stands at the field. */
+/**
+ * A refusal in answer to a form, read out at once; what is wrong with each field stands at the field. How long to wait,
+ * where one has to, the book's own sentence says.
+ */
 export function ProblemNotice({ problem, children }: { readonly problem: Refusal; readonly children?: ReactNode }) {
   return (
     <Notice look="stop" title={problem.title} live>
       <p>{problem.detail}</p>
-      {problem.retryAfterSeconds === undefined ? null : <p>Try again in {inWords(problem.retryAfterSeconds)}.</p>}
       {children}
     </Notice>
   );
-}
-
-function inWords(seconds: number): string {
-  if (seconds < 90) return `${String(Math.ceil(seconds))} seconds`;
-  return `${String(Math.ceil(seconds / 60))} minutes`;
 }
