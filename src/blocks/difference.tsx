@@ -46,32 +46,7 @@ function StretchOf({ stretch }: { readonly stretch: Stretch }): ReactElement {
       </details>
     );
   }
-  if (stretch.kind === 'table') {
-    return (
-      <div className="difference-table" role="group" aria-label="Rows of a table">
-        <table>
-          <tbody>
-            {stretch.lines
-              .filter((line) => !isTableRule(line))
-              .map((line, index) => (
-                <tr
-                  key={`${keyOf(line)}-${String(index)}`}
-                  className={classNames('difference-row', `difference-${line.kind}`)}
-                >
-                  <LineNumber line={line} />
-                  {cellsOf(line.words).map((words, cell) => (
-                    // A cell has nothing of its own but its place.
-                    <td key={String(cell)}>
-                      <Words words={words} />
-                    </td>
-                  ))}
-                </tr>
-              ))}
-          </tbody>
-        </table>
-      </div>
-    );
-  }
+  if (stretch.kind === 'table') return <Rows lines={stretch.lines.filter((line) => !isTableRule(line))} />;
   return (
     <div className="difference-text">
       {stretch.lines.map((line, index) => (
@@ -82,6 +57,33 @@ function StretchOf({ stretch }: { readonly stretch: Stretch }): ReactElement {
           </span>
         </p>
       ))}
+    </div>
+  );
+}
+
+function Rows({ lines }: { readonly lines: readonly LineChange[] }): ReactElement {
+  const rows = lines.map((line) => ({ line, cells: cellsOf(line.words) }));
+  const columns = Math.max(...rows.map(({ cells }) => cells.length));
+  return (
+    <div className="difference-table" role="group" aria-label="Rows of a table">
+      <table>
+        <tbody>
+          {rows.map(({ line, cells }, index) => (
+            <tr
+              key={`${keyOf(line)}-${String(index)}`}
+              className={classNames('difference-row', `difference-${line.kind}`)}
+            >
+              <LineNumber line={line} />
+              {cells.map((words, cell) => (
+                // A cell has nothing of its own but its place. The last one takes what a shorter row leaves empty.
+                <td key={String(cell)} colSpan={cell === cells.length - 1 ? columns - cell : 1}>
+                  <Words words={words} />
+                </td>
+              ))}
+            </tr>
+          ))}
+        </tbody>
+      </table>
     </div>
   );
 }
