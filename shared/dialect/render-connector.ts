@@ -22,8 +22,7 @@ export function renderConnector(block: ConnectorBlock, level: number, context: R
     renderFacts(block, context),
     `<div class="face-and-lines${isWide(face) ? ' wide' : ''}">`,
     renderFace(block, face, name, id === null ? null : `turn-${id}`, context),
-    renderTable(block, context, seats),
-    '</div></section>',
+    `<div class="table-plate">${renderTable(block, context, seats)}</div></div></section>`,
   ].join('');
 }
 
