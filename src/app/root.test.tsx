@@ -1,5 +1,5 @@
 // @vitest-environment jsdom
-import { cleanup, render, screen, waitFor } from '@testing-library/react';
+import { cleanup, configure, render, screen, waitFor } from '@testing-library/react';
 import { userEvent } from '@testing-library/user-event';
 import { createMemoryRouter, RouterContextProvider, RouterProvider } from 'react-router';
 import { afterEach, beforeEach, describe, expect, it, vi } from 'vitest';
@@ -11,6 +11,9 @@ import { apiContext, benchContext, queryClientContext } from '../lib/api-context
 import { readBench } from '../lib/bench.ts';
 import { createQueryClient, Providers } from './providers.tsx';
 import { routes } from './routes.tsx';
+
+// A busy machine is slow, not wrong.
+configure({ asyncUtilTimeout: 15_000 });
 
 const visitor: Viewer = { member: null, waiting: 0 };
 const donor = {

@@ -1,9 +1,12 @@
 // @vitest-environment jsdom
-import { cleanup, render, screen, waitFor, within } from '@testing-library/react';
+import { cleanup, configure, render, screen, waitFor, within } from '@testing-library/react';
 import { userEvent } from '@testing-library/user-event';
 import { createMemoryRouter, RouterProvider } from 'react-router';
 import { afterEach, beforeEach, describe, expect, it, vi } from 'vitest';
 import { RenderedPage } from './rendered-page.tsx';
+
+// A busy machine is slow, not wrong.
+configure({ asyncUtilTimeout: 15_000 });
 
 /** What the dialect gives for a connector of three cavities, cut down to what the handlers go by. */
 const html = `
