@@ -5,8 +5,8 @@ const eventSchema = z.object({
   ph: z.string(),
   pid: z.number(),
   tid: z.number(),
-  /** Microseconds. */
-  dur: z.number().optional(),
+  /** Microseconds in which the thread had a processor: a phone's slowness is in it, other programs of this machine not. */
+  tdur: z.number().optional(),
   args: z.object({ name: z.unknown().optional() }).loose().optional(),
 });
 const traceSchema = z.object({ traceEvents: z.array(z.unknown()) });
@@ -14,7 +14,10 @@ const traceSchema = z.object({ traceEvents: z.array(z.unknown()) });
 /** Names under which Chromium's trace has one task of a thread, from its start to its end. */
 const taskNames: readonly string[] = ['RunTask', 'ThreadControllerImpl::RunTask'];
 
-/** Milliseconds of the longest task that a page's own thread ran while a trace was taken; workers are not counted. */
+/**
+ * Milliseconds of the longest task that a page's own thread ran while a trace was taken; workers are not counted. What
+ * slows the processor down does so by keeping it busy, and is counted.
+ */
 export function longestMainThreadTask(trace: Buffer): number {
   const { traceEvents } = traceSchema.parse(JSON.parse(trace.toString()));
   const events = traceEvents.flatMap((event) => {
@@ -27,5 +30,5 @@ export function longestMainThreadTask(trace: Buffer): number {
   );
   const tasks = events.filter((event) => taskNames.includes(event.name) && mainThreads.has(threadOf(event)));
   if (tasks.length === 0) throw new Error('the trace has no task of a page');
-  return Math.max(...tasks.map(({ dur = 0 }) => dur)) / 1000;
+  return Math.max(...tasks.map(({ tdur = 0 }) => tdur)) / 1000;
 }
