@@ -8,6 +8,7 @@ import { machineWords, tableText } from './print-table.ts';
 import { publishingRows } from './publishing-bench.ts';
 import { renderingRows } from './rendering-bench.ts';
 import type { BenchRow } from './row.ts';
+import { searchRows } from './search-bench.ts';
 import { servingRows } from './serving-bench.ts';
 import { weightRows } from './weight-bench.ts';
 
@@ -18,6 +19,7 @@ const groups: Readonly<Record<string, (pace: Pace) => Promise<BenchRow[]>>> = {
   parsing: parsingRows,
   publishing: publishingRows,
   growth: growthRows,
+  search: searchRows,
   weight: weightRows,
   'first-paint': firstPaintRows,
   'page-thread': pageThreadRows,

@@ -112,6 +112,20 @@ describe('the search client', () => {
     expect((await Promise.all(answers)).map((view) => view?.query ?? null)).toEqual(['h', null, null, 'horn']);
   });
 
+  test('stops asking where the book is not for whoever is here, and asks again when it is next started', async () => {
+    const { client, said, asked, settle, halfAMinute } = openClient([
+      () => new Response(null, { status: 401 }),
+      () => manifest(1),
+    ]);
+    client.start();
+    await settle();
+    await halfAMinute();
+    expect(asked).toHaveLength(1);
+    client.start();
+    await settle();
+    expect(said).toEqual([{ kind: 'load', files: { lines: 'lines-1', prose: 'prose-1' } }]);
+  });
+
   test('takes a manifest that it does not know for no news', async () => {
     const { client, said, settle } = openClient([() => new Response('{"version":7}', { status: 200 })]);
     client.start();

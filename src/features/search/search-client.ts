@@ -12,7 +12,7 @@ export interface SearchStatus {
 
 /** The search in this browser: a thread that holds the index, kept up to date. */
 export interface SearchClient {
-  /** Starts the thread and the asking for news; further calls do nothing. */
+  /** Starts the thread and the asking for news; while they go on further calls do nothing. */
   start(): void;
   status(): SearchStatus;
   subscribe(listener: () => void): () => void;
@@ -46,6 +46,7 @@ export function createSearchClient({ startThread, fetcher, later }: ClientSurrou
   let thread: SearchThread | null = null;
   let current = nothingYet;
   let tag: string | null = null;
+  let looking = false;
   let asked = 0;
   let inFlight: { readonly id: number; readonly resolve: (view: SearchView | null) => void } | null = null;
   let next: { readonly question: Question; readonly resolve: (view: SearchView | null) => void } | null = null;
@@ -80,18 +81,24 @@ export function createSearchClient({ startThread, fetcher, later }: ClientSurrou
   }
 
   async function lookForNews(): Promise<void> {
+    looking = true;
     try {
       const response = await fetcher(manifestPath, {
         // Asked by hand, so that an unchanged manifest costs its headers and nothing else.
         cache: 'no-store',
         headers: { accept: 'application/json', ...(tag === null ? {} : { 'if-none-match': tag }) },
       });
+      become({ network: 'reached' });
+      // Not for whoever is here now: it is asked for again when somebody next turns to the search.
+      if (response.status === 401 || response.status === 403) {
+        looking = false;
+        return;
+      }
       if (response.status === 200) {
         const files = readFiles(await response.json());
         tag = response.headers.get('etag');
         if (files !== null) thread?.say({ kind: 'load', files });
       }
-      become({ network: 'reached' });
     } catch {
       become({ network: 'unreachable' });
     }
@@ -100,10 +107,11 @@ export function createSearchClient({ startThread, fetcher, later }: ClientSurrou
 
   return {
     start() {
-      if (thread !== null) return;
-      thread = startThread();
-      thread.listen(hear);
-      void lookForNews();
+      if (thread === null) {
+        thread = startThread();
+        thread.listen(hear);
+      }
+      if (!looking) void lookForNews();
     },
     status: () => current,
     subscribe(listener) {
