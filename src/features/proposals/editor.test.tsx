@@ -1,6 +1,6 @@
 // @vitest-environment jsdom
 import { QueryClient, QueryClientProvider } from '@tanstack/react-query';
-import { cleanup, render, screen, waitFor } from '@testing-library/react';
+import { cleanup, configure, render, screen, waitFor } from '@testing-library/react';
 import { userEvent } from '@testing-library/user-event';
 import { createMemoryRouter, RouterContextProvider, RouterProvider } from 'react-router';
 import { afterEach, beforeEach, describe, expect, it, vi } from 'vitest';
@@ -56,6 +56,9 @@ function open(
 const text = (): HTMLTextAreaElement => screen.getByLabelText('The page’s text');
 const summary = (): HTMLInputElement => screen.getByLabelText('What did you change, and why?');
 
+// A shared machine may take its time; what is waited for ends the waiting.
+configure({ asyncUtilTimeout: 15_000 });
+
 beforeEach(() => {
   localStorage.clear();
   // jsdom lays nothing out.
@@ -66,7 +69,7 @@ afterEach(cleanup);
 describe('what the book finds', () => {
   it('stands beside the text, what stops it first, and leads to the line in the text', async () => {
     const { user } = open();
-    await screen.findByText('As it will look', {}, { timeout: 3000 });
+    await screen.findByText('As it will look');
     const rows = screen.getAllByRole('listitem').map((row) => row.textContent);
     expect(rows[0]).toContain('Stops it: Cavity 9 is outside headlight.');
     expect(rows[1]).toContain('Hint: No source is named.');
