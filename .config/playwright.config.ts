@@ -5,7 +5,7 @@ export default defineConfig({
   testDir: '../tests/browser',
   outputDir: '../.cache/browser',
   globalSetup: '../tests/browser/global-setup.ts',
-  timeout: 90_000,
+  timeout: 300_000,
   workers: 2,
   fullyParallel: false,
   forbidOnly: true,

@@ -50,7 +50,7 @@ function sheetsFor(looker: Looker): readonly Sheet[] {
 
 for (const looker of lookers) {
   test(`every sheet that a ${looker} sees is without console errors and axe findings, in light and dark`, async ({ browser }) => {
-    test.setTimeout(long ? 900_000 : 300_000);
+    test.setTimeout(long ? 3_600_000 : 900_000);
     const widths = long ? [360, 390, 768, 1280] : [1280];
     for (const width of widths) {
       const context = await browser.newContext({ viewport: { width, height: 900 }, reducedMotion: 'reduce' });
@@ -68,7 +68,7 @@ for (const looker of lookers) {
   });
 
   test(`no sheet that a ${looker} sees scrolls sideways at 360 px, with JavaScript or without`, async ({ browser }) => {
-    test.setTimeout(180_000);
+    test.setTimeout(600_000);
     for (const javaScriptEnabled of [true, false]) {
       const context = await browser.newContext({ viewport: { width: 360, height: 740 }, javaScriptEnabled });
       const { page, complaints } = await open(context, looker);
