@@ -74,11 +74,11 @@ export function namesTag(header: string, tag: string): boolean {
   });
 }
 
-/** A text to send, and how it may be kept by others. */
+/** A text to send, as such or in UTF-8, and how it may be kept by others. */
 export interface Representation {
   readonly status: number;
   readonly contentType: string;
-  readonly text: string;
+  readonly text: string | Buffer;
   readonly cacheControl: string;
 }
 
@@ -98,7 +98,7 @@ export async function sendRepresentation(
   response: ServerResponse,
   { status, contentType, text, cacheControl }: Representation,
 ): Promise<void> {
-  const bytes = Buffer.from(text);
+  const bytes = typeof text === 'string' ? Buffer.from(text) : text;
   response.setHeader('Cache-Control', cacheControl);
   response.setHeader('Vary', vary);
   const wanted = isWorthCompressing(bytes) ? chooseEncoding(request.headers['accept-encoding']) : 'identity';

@@ -17,7 +17,7 @@ export interface VisitorPages {
   /** Keeps a page that was rendered for this key, and sends it. */
   keepAndSend(
     key: string,
-    html: string,
+    html: Buffer,
     generation: number,
     request: IncomingMessage,
     response: ServerResponse,

@@ -21,7 +21,7 @@ export interface KeptPages {
    * Keeps a page. One that was begun before the last `clear` is made up but not kept, since what it shows may be old.
    * @param key path and variant
    */
-  put(key: string, html: string, headers: Readonly<Record<string, string>>, generation: number): KeptPage;
+  put(key: string, html: string | Buffer, headers: Readonly<Record<string, string>>, generation: number): KeptPage;
   clear(): void;
   /** Resolves when nothing is left to compress. */
   compressed(): Promise<void>;
@@ -86,7 +86,7 @@ export function createKeptPages(mostBytes: number): KeptPages {
       return entry.page;
     },
     put(key, html, headers, begunIn) {
-      const identity = Buffer.from(html);
+      const identity = typeof html === 'string' ? Buffer.from(html) : html;
       const etag = `W/"${createHash('sha256').update(identity).digest('base64url').slice(0, 22)}"`;
       const page: KeptPage = { etag, headers, identity, gzip: null, brotli: null };
       if (begunIn !== generation) return page;

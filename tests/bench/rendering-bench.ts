@@ -57,7 +57,7 @@ export async function renderingRows(pace: Pace): Promise<BenchRow[]> {
     const renderToBytes = async (request: Request): Promise<Buffer> => {
       const rendered = await render(request, options);
       if (rendered.kind !== 'page' || rendered.status !== 200) throw new Error(`${request.url} was not rendered`);
-      return Buffer.from(fillTemplate(template, rendered));
+      return fillTemplate(template, rendered);
     };
     const rows: BenchRow[] = [];
     for (const path of pages) {
